@@ -1,22 +1,16 @@
-import { fileURLToPath } from "node:url";
 import { defineConfig } from "vitest/config";
-
-const root = fileURLToPath(new URL("..", import.meta.url));
+import { apart, inTurn, resolve, root } from "./vitest.shared.mts";
 
 export default defineConfig({
   root,
-  resolve: {
-    alias: [
-      { find: /^@\//, replacement: root },
-      { find: /^server-only$/, replacement: `${root}tests/helpers/empty.ts` },
-    ],
-  },
+  resolve,
   test: {
-    include: ["tests/**/*.test.ts", "tests/**/*.test.tsx"],
-    environment: "node",
-    testTimeout: 60_000,
-    hookTimeout: 120_000,
-    pool: "forks",
-    passWithNoTests: false,
+    coverage: { provider: "v8", include: ["lib/**/*.ts", "db/**/*.ts"], reportsDirectory: "coverage" },
+    projects: [
+      apart("fast", ["structure", "unit", "property", "reference"]),
+      apart("services", ["services"]),
+      inTurn("api", ["api"], 1),
+      inTurn("browser", ["browser"], 2),
+    ],
   },
 });

@@ -1,0 +1,1 @@
+export declare const contentHash: (salt?: string) => string;
