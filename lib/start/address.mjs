@@ -5,8 +5,8 @@ import { Refusal } from "./run.mjs";
 export const listenAddress = (env = process.env) => {
   const text = env.PORT ?? "3000";
   const port = /^\d{1,5}$/.test(text) ? Number(text) : Number.NaN;
-  if (!(port >= 1 && port <= 65535)) {
-    throw new Refusal(`PORT is "${text}"; it must be a whole number from 1 to 65535.`);
+  if (!(port >= 0 && port <= 65535)) {
+    throw new Refusal(`PORT is "${text}"; it must be a whole number from 0 (any free one) to 65535.`);
   }
   return { port, host: env.HOST || "127.0.0.1" };
 };

@@ -12,14 +12,14 @@ const stopOn = (server) => {
   const end = () => {
     if (ending) return;
     ending = true;
+    setTimeout(() => server.closeAllConnections(), FINISH_MS).unref();
+    setTimeout(() => process.exit(1), FINISH_MS + 1_500).unref();
     server.close(async () => {
-      // The database's side hangs its own closing here (checkpoint, close), whichever bundle opened it.
-      await globalThis.flitchbookOnStop?.();
+      // db/client.ts keeps the database of the process there, whichever bundle opened it.
+      await (await globalThis.flitchbookDb)?.close();
       process.exit(0);
     });
     server.closeIdleConnections();
-    setTimeout(() => server.closeAllConnections(), FINISH_MS).unref();
-    setTimeout(() => process.exit(1), FINISH_MS + 1_500).unref();
   };
   process.on("SIGTERM", end).on("SIGINT", end);
 };
@@ -37,16 +37,17 @@ main(async () => {
   // Next would end the process by itself on a signal, before open requests are finished.
   process.env.NEXT_MANUAL_SIG_HANDLE = "true";
   const address = listenAddress();
-  const app = next({ dev: false, dir: ROOT, hostname: address.host, port: address.port });
   const server = createServer();
   stopOn(server);
   await new Promise((resolve, reject) => {
     server.once("error", (error) => reject(listenRefusal(error, address)));
     server.listen(address, resolve);
   });
+  const { port } = server.address();
+  const app = next({ dev: false, dir: ROOT, hostname: address.host, port });
   const handler = prepared(app).then(() => app.getRequestHandler());
   server.on("request", async (request, response) => (await handler)(request, response));
   await handler;
   const shown = address.host.includes(":") ? `[${address.host}]` : address.host;
-  process.stdout.write(`Flitchbook is at http://${shown}:${address.port}\n`);
+  process.stdout.write(`Flitchbook is at http://${shown}:${port}\n`);
 });
