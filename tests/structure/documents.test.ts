@@ -14,7 +14,6 @@ describe.each(["README.md", "DEVELOPERS.md"])("%s", (document) => {
 
   test("quotes only paths that exist", () => {
     const quoted = [...text.matchAll(new RegExp("`((?:" + FOLDERS + ")/[^`\\s]*)`", "g"))].map((m) => m[1]!);
-    expect(quoted).not.toEqual([]);
     const missing = quoted
       .filter((path) => !ABSENT_IS_FINE.test(path))
       .filter((path) => !existsSync(join(ROOT, path)));
