@@ -1,16 +1,13 @@
 import { z } from "zod";
+import { FAMILY_DIMENSIONS, type Family } from "@/lib/profiles/families";
+import { MAX_LENGTH_MM, MIN_SIZE_MM } from "@/lib/geometry/limits";
 
 /** Limits of a drawing: enforced in the browser and again on the server. */
 export const MAX_PARTS = 500;
 export const MAX_VERTICES = 20_000;
-/** Largest coordinate or size, mm: 1 km. Smallest size, mm: 1 µm. */
-export const MAX_LENGTH_MM = 1e6;
-export const MIN_SIZE_MM = 1e-3;
 
 const coordinate = z.number().min(-MAX_LENGTH_MM).max(MAX_LENGTH_MM);
 const size = z.number().min(MIN_SIZE_MM).max(MAX_LENGTH_MM);
-const sizeOrZero = z.number().min(0).max(MAX_LENGTH_MM);
-const slope = z.number().min(0).max(1);
 const id = z.string().min(1).max(64);
 const label = z.string().max(120);
 const point = z.strictObject({ x: coordinate, y: coordinate });
@@ -20,78 +17,6 @@ const vertex = z.strictObject({
   bulge: z.number().min(-1e3).max(1e3).optional(),
 });
 const ring = z.array(vertex).min(2).max(MAX_VERTICES);
-
-const tapered = {
-  flangeSlope: slope.optional(),
-  toeRadius: sizeOrZero.optional(),
-  thicknessAt: sizeOrZero.optional(),
-};
-
-/** Dimensions of each family, mm; which dimension means what stands in `lib/profiles`. */
-export const FAMILY_DIMENSIONS = {
-  "i-section": z.strictObject({
-    depth: size,
-    flangeWidth: size,
-    webThickness: size,
-    flangeThickness: size,
-    rootRadius: sizeOrZero,
-    ...tapered,
-  }),
-  "i-section-unequal": z.strictObject({
-    depth: size,
-    topWidth: size,
-    topThickness: size,
-    bottomWidth: size,
-    bottomThickness: size,
-    webThickness: size,
-    rootRadius: sizeOrZero,
-  }),
-  channel: z.strictObject({
-    depth: size,
-    flangeWidth: size,
-    webThickness: size,
-    flangeThickness: size,
-    rootRadius: sizeOrZero,
-    ...tapered,
-  }),
-  angle: z.strictObject({
-    legLong: size,
-    legShort: size,
-    thickness: size,
-    rootRadius: sizeOrZero,
-    toeRadius: sizeOrZero,
-  }),
-  tee: z.strictObject({
-    depth: size,
-    flangeWidth: size,
-    webThickness: size,
-    flangeThickness: size,
-    rootRadius: sizeOrZero,
-  }),
-  zee: z.strictObject({ depth: size, flangeWidth: size, thickness: size, innerRadius: sizeOrZero }),
-  "rectangular-hollow": z.strictObject({
-    depth: size,
-    width: size,
-    thickness: size,
-    outerRadius: sizeOrZero,
-    innerRadius: sizeOrZero,
-  }),
-  "round-hollow": z.strictObject({ diameter: size, thickness: size }),
-  flat: z.strictObject({ width: size, thickness: size }),
-  round: z.strictObject({ diameter: size }),
-  "lipped-channel": z.strictObject({
-    depth: size,
-    flangeWidth: size,
-    lip: size,
-    thickness: size,
-    innerRadius: sizeOrZero,
-  }),
-  timber: z.strictObject({ width: size, depth: size }),
-} as const;
-
-export type Family = keyof typeof FAMILY_DIMENSIONS;
-export type FamilyDimensions = { [F in Family]: z.infer<(typeof FAMILY_DIMENSIONS)[F]> };
-export type Profile = { [F in Family]: { family: F; dimensions: FamilyDimensions[F] } }[Family];
 
 const profileOf = <F extends Family>(family: F) =>
   z.strictObject({
