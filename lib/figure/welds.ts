@@ -40,7 +40,11 @@ export const weldMarks = (
     return contact.lines
       .filter((l) => !l.bulge)
       .flatMap((l) => [...cornerAt(l, 1, sides), ...cornerAt(l, -1, sides)])
-      .map((c) => ({ ...c, kind: "weld" as const, sized: joint?.size != null || joint?.kind === "cjp" }));
+      .map((c) => ({
+        ...c,
+        kind: "weld" as const,
+        sized: (joint?.size ?? null) !== null || joint?.kind === "cjp",
+      }));
   });
 };
 
