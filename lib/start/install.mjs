@@ -16,7 +16,9 @@ export const isInstalled = (root = ROOT) => {
   return Object.entries(wanted).every(([path, entry]) => {
     if (path === "") return true;
     const found = present[path];
-    return found === undefined ? Boolean(entry.optional || entry.peer) : found.version === entry.version;
+    return found === undefined
+      ? Boolean(entry.optional || entry.peer || entry.extraneous)
+      : found.version === entry.version;
   });
 };
 
