@@ -1,4 +1,5 @@
-import type { DrawingMaterial, PartShape, Profile } from "@/lib/drawing/schema";
+import type { DrawingMaterial, PartShape } from "@/lib/drawing/schema";
+import type { Profile } from "@/lib/profiles/families";
 import type { Fault, Result } from "@/lib/result";
 import { err, ok } from "@/lib/result";
 import type { Material } from "@/lib/section/section";

@@ -1,5 +1,6 @@
 import { ringMoments } from "@/lib/geometry/moments";
 import type { Point, Region, Ring, Vertex } from "@/lib/geometry/region";
+import { reverseRing } from "@/lib/geometry/reverse-ring";
 
 /** A vertex without a `bulge` key where the edge is straight, so that equal geometry is equal as data. */
 export const vertexOf = (x: number, y: number, bulge = 0): Vertex =>
@@ -18,14 +19,6 @@ export const ringArea = (ring: Ring): number => {
 /** Area of a region, mm²: the outer ring less its holes. Holes count by size whichever way they run. */
 export const regionArea = (region: Region): number =>
   region.holes.reduce((area, hole) => area - Math.abs(ringArea(hole)), Math.abs(ringArea(region.outer)));
-
-/** The same curve run the other way: vertices reversed, each bulge moved to the vertex its edge now leaves, and negated. */
-export const reverseRing = (ring: Ring): Ring =>
-  ring.map((_, i) => {
-    const from = ring[ring.length - 1 - i];
-    const edge = ring[(2 * ring.length - 2 - i) % ring.length];
-    return from === undefined ? { x: 0, y: 0 } : vertexOf(from.x, from.y, -(edge?.bulge ?? 0));
-  });
 
 /** The ring run anticlockwise (`outer`) or clockwise (`hole`), as `Region` asks. */
 export const orientRing = (ring: Ring, as: "outer" | "hole"): Ring =>

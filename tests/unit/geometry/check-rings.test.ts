@@ -5,7 +5,8 @@ import { checkRings } from "@/lib/geometry/check-rings";
 import { findCrossing } from "@/lib/geometry/find-crossing";
 import { edgesMeet } from "@/lib/geometry/meet";
 import type { Ring } from "@/lib/geometry/region";
-import { regionArea, reverseRing } from "@/lib/geometry/ring";
+import { reverseRing } from "@/lib/geometry/reverse-ring";
+import { regionArea } from "@/lib/geometry/ring";
 import { expectRel } from "@/tests/helpers/expect-rel";
 
 const square: Ring = [
