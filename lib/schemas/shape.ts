@@ -1,5 +1,6 @@
 import { z } from "zod";
-import { DrawingV1, FAMILY_DIMENSIONS, type Family } from "@/lib/drawing/schema";
+import { DrawingV1 } from "@/lib/drawing/schema";
+import { FAMILY_DIMENSIONS, type Family } from "@/lib/profiles/families";
 import { Right } from "./access";
 import { FiguresSource } from "./bay";
 import { Id, Moment, Person, plainText, Version } from "./common";
