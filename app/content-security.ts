@@ -3,13 +3,13 @@ export const NONCE_HEADER = "x-nonce";
 
 /**
  * Content security policy of a page. Scripts and style elements need the nonce; style attributes are allowed, because Radix
- * and the canvas set them. The development server needs eval for its error overlay and a socket for reloading.
+ * and the canvas set them. The development server needs eval and free styles for its error overlay, and a socket for reloading.
  */
 export function contentSecurityPolicy(nonce: string, development: boolean): string {
   return [
     "default-src 'self'",
     `script-src 'self' 'nonce-${nonce}' 'strict-dynamic'${development ? " 'unsafe-eval'" : ""}`,
-    `style-src 'self' 'nonce-${nonce}'`,
+    development ? "style-src 'self' 'unsafe-inline'" : `style-src 'self' 'nonce-${nonce}'`,
     "style-src-attr 'unsafe-inline'",
     "img-src 'self' data: blob:",
     "font-src 'self'",

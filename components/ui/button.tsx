@@ -8,10 +8,10 @@ export type ButtonSize = "body" | "small" | "block";
 type Look = Readonly<{ kind?: ButtonKind; size?: ButtonSize }>;
 
 const KIND: Record<ButtonKind, string> = {
-  main: "snipe text-on-oxide font-[600] border-transparent",
-  other: "border-edge bg-transparent hover:bg-wash active:bg-wash",
-  plain: "border-transparent bg-transparent hover:bg-wash active:bg-wash",
-  danger: "border-oxide-ink text-oxide-ink bg-transparent hover:bg-oxide-wash",
+  main: "snipe text-on-oxide font-[600] border-0",
+  other: "border border-edge bg-transparent hover:bg-wash active:bg-wash",
+  plain: "border border-transparent bg-transparent hover:bg-wash active:bg-wash",
+  danger: "border border-oxide-ink text-oxide-ink bg-transparent hover:bg-oxide-wash",
 };
 const SIZE: Record<ButtonSize, string> = {
   body: "h-7 px-3 text-body max-md:h-11",
@@ -22,10 +22,10 @@ const SIZE: Record<ButtonSize, string> = {
 /** Class of a button; exported so that links can look like one. */
 export const buttonClass = ({ kind = "other", size = "body" }: Look = {}): string =>
   cx(
-    "inline-flex items-center justify-center gap-2 whitespace-nowrap border font-[540] no-underline select-none",
+    "inline-flex items-center justify-center gap-2 whitespace-nowrap font-[540] no-underline select-none",
     "transition-colors duration-[var(--fb-motion-fast)] ease-shop focus-visible:outline-offset-2",
-    "disabled:border-dashed disabled:border-edge disabled:bg-none disabled:bg-transparent disabled:text-ink-3",
-    "aria-disabled:border-dashed aria-disabled:border-edge aria-disabled:bg-none aria-disabled:bg-transparent aria-disabled:text-ink-3",
+    "disabled:border disabled:border-dashed disabled:border-edge disabled:bg-none disabled:bg-transparent disabled:text-ink-3",
+    "aria-disabled:border aria-disabled:border-dashed aria-disabled:border-edge aria-disabled:bg-none aria-disabled:bg-transparent aria-disabled:text-ink-3",
     KIND[kind],
     SIZE[size],
   );

@@ -51,13 +51,15 @@ export function NumericField(props: NumericFieldProps) {
     ...ids
   } = props;
   const [typed, setTyped] = useState<string | null>(null);
+  const [asked, setAsked] = useState(false);
   const input = useRef<HTMLInputElement>(null);
   const empty = typed !== null && typed.trim() === "";
   const read = typed === null || empty ? null : parse(typed);
-  const refused = typed !== null && ((read !== null && !read.ok) || (empty && !optional));
+  const refused = asked && typed !== null && ((read !== null && !read.ok) || (empty && !optional));
   const atRest = value === null ? "" : format(value);
 
   const commit = () => {
+    setAsked(true);
     if (typed === null) return;
     if (empty && optional) onCommit(null);
     else if (read?.ok) {
@@ -90,7 +92,10 @@ export function NumericField(props: NumericFieldProps) {
         placeholder={placeholder}
         value={typed ?? atRest}
         aria-invalid={refused || undefined}
-        onChange={(event) => setTyped(event.target.value)}
+        onChange={(event) => {
+          setTyped(event.target.value);
+          setAsked(false);
+        }}
         onFocus={(event) => event.target.select()}
         onBlur={commit}
         onKeyDown={onKeyDown}
