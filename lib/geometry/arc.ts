@@ -1,3 +1,4 @@
+import { chordArcOf, furthestOnChordArc, onChordArc } from "@/lib/geometry/chord-arc";
 import type { Point, Vertex } from "@/lib/geometry/region";
 
 /** A circular arc. Angles in radians from +x anticlockwise; `sweep` is signed, positive anticlockwise; radius in mm. */
@@ -6,14 +7,17 @@ export type Arc = Readonly<{ centre: Point; radius: number; start: number; sweep
 /** A rectangle parallel to the axes that holds a shape, mm. */
 export type Box = Readonly<{ xMin: number; xMax: number; yMin: number; yMax: number }>;
 
-/** Whether the edge that leaves this vertex is an arc (an absent or zero bulge is a straight line). */
-export const isArc = (vertex: Vertex): boolean => vertex.bulge !== undefined && vertex.bulge !== 0;
+/** Flatter than this an edge has no centre worth computing: it stands off its chord by half a nanometre on a metre. */
+const FLAT_BULGE = 1e-9;
+
+/** Whether the edge that leaves this vertex is an arc with a centre (an absent or tiny bulge is a straight line). */
+export const isArc = (vertex: Vertex): boolean => Math.abs(vertex.bulge ?? 0) > FLAT_BULGE;
 
 /**
  * Centre, radius, start angle and signed sweep of the arc edge from `from` to `to`.
  * @param from vertex with its bulge (tan of a quarter of the included angle, positive anticlockwise), mm.
  * @param to end of the edge, mm.
- * @returns null where the edge is straight (no bulge) or has no length: neither has a centre.
+ * @returns null where the edge is straight (no bulge, or one of at most 1e-9) or has no length: neither has a centre.
  * @source Plane geometry: for a chord L and bulge b, r = L(1 + b²)/(4|b|) and the centre lies L(1 − b²)/(4b) to the
  * left of the chord's middle.
  */
@@ -22,7 +26,7 @@ export const arcOf = (from: Vertex, to: Point): Arc | null => {
   const dx = to.x - from.x;
   const dy = to.y - from.y;
   const chord = Math.hypot(dx, dy);
-  if (bulge === 0 || chord === 0) return null;
+  if (!isArc(from) || chord === 0) return null;
   const offset = (1 - bulge * bulge) / (4 * bulge);
   const centre = { x: (from.x + to.x) / 2 - dy * offset, y: (from.y + to.y) / 2 + dx * offset };
   const radius = (chord * (1 + bulge * bulge)) / (4 * Math.abs(bulge));
@@ -76,10 +80,14 @@ export const edgeLength = (from: Vertex, to: Point): number => {
  * Where the whole edge is equally far, its start is returned.
  */
 export const furthestOnEdge = (from: Vertex, to: Point, direction: Point): Point => {
-  const arc = arcOf(from, to);
-  if (arc !== null && shareAtAngle(arc, Math.atan2(direction.y, direction.x)) !== null) {
-    const { centre, radius } = arc;
-    return { x: centre.x + radius * direction.x, y: centre.y + radius * direction.y };
+  const arc = chordArcOf(from, to);
+  const x = arc === null ? null : furthestOnChordArc(arc, direction);
+  if (arc !== null && x !== null) {
+    const { u, v } = onChordArc(arc, x);
+    return {
+      x: arc.middle.x + u * arc.along.x + v * arc.towards.x,
+      y: arc.middle.y + u * arc.along.y + v * arc.towards.y,
+    };
   }
   const startDistance = from.x * direction.x + from.y * direction.y;
   const endDistance = to.x * direction.x + to.y * direction.y;

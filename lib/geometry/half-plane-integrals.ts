@@ -1,4 +1,4 @@
-import { arcOf, type Arc } from "@/lib/geometry/arc";
+import { chordArcOf, furthestOnChordArc, onChordArc, type ChordArc } from "@/lib/geometry/chord-arc";
 import { segmentIntegrals } from "@/lib/geometry/circular-segment";
 import type { WeightedRegions } from "@/lib/geometry/moments";
 import type { Point, Vertex } from "@/lib/geometry/region";
@@ -15,7 +15,17 @@ export type Below = Readonly<{ area: number; moment: number; width: number }>;
 export type Strips = Readonly<{ sMin: number; sMax: number; below: (d: number) => Below }>;
 
 type Line = Readonly<{ s0: number; s1: number; rise: number; weight: number }>;
-type Curve = Readonly<{ s0: number; s1: number; rise: number; weight: number; centre: number; arc: Arc }>;
+
+/** An arc with the directions of its chord frame resolved across (s) and along (t) the line. */
+type Curve = Readonly<{
+  arc: ChordArc;
+  middle: number;
+  us: number;
+  ut: number;
+  vs: number;
+  vt: number;
+  weight: number;
+}>;
 
 type Sum = { area: number; moment: number; width: number };
 
@@ -33,37 +43,53 @@ const addLine = (sum: Sum, s0: number, s1: number, rise: number, d: number, weig
   sum.width -= dt;
 };
 
-/** The stretch of arc between two angles, all of it below the line: its chord and the segment beside the chord. */
+/** The stretch of arc between two places, all of it below the line: its chord and the segment beside the chord. */
 const addStretch = (sum: Sum, curve: Curve, from: number, to: number, d: number): void => {
-  const { radius, sweep } = curve.arc;
-  const turn = Math.abs(to - from);
-  if (turn === 0) return;
-  const s0 = curve.centre + radius * Math.cos(from);
-  const s1 = curve.centre + radius * Math.cos(to);
-  const rise = radius * (Math.sin(to) - Math.sin(from));
-  addLine(sum, Math.min(s0, d), Math.min(s1, d), rise, d, curve.weight);
-  const chord = 2 * radius * Math.sin(Math.min(turn / 2, Math.PI));
-  if (!(chord > 0)) return;
-  const segment = segmentIntegrals(chord, Math.tan(turn / 4));
-  const sign = Math.sign(sweep) * curve.weight;
-  const towardsArc = Math.cos((from + to) / 2);
-  sum.area += sign * segment.area;
-  sum.moment += sign * ((d - (s0 + s1) / 2) * segment.area - towardsArc * segment.v);
+  const { arc, middle, us, ut, vs, vt, weight } = curve;
+  const [p, q] = [onChordArc(arc, from), onChordArc(arc, to)];
+  const [s0, s1] = [middle + us * p.u + vs * p.v, middle + us * q.u + vs * q.v];
+  const rise = ut * (q.u - p.u) + vt * (q.v - p.v);
+  // An end that the line cuts lies on it up to rounding: its height is clamped, and the width taken whole.
+  addLine(sum, Math.min(s0, d), Math.min(s1, d), rise, d, weight);
+  if (s0 >= d && s1 >= d) sum.width -= rise * weight;
+  const [psi0, psi1] = [2 * Math.atan(arc.bulge * from), 2 * Math.atan(arc.bulge * to)];
+  const bulge = Math.tan((psi1 - psi0) / 4);
+  const chord = Math.hypot(q.u - p.u, q.v - p.v);
+  if (!(chord > 0 && bulge > 0)) return;
+  const segment = segmentIntegrals(chord, bulge);
+  const psi = (psi0 + psi1) / 2;
+  const towards = us * Math.sin(psi) + vs * Math.cos(psi);
+  sum.area += arc.sign * weight * segment.area;
+  sum.moment += arc.sign * weight * ((d - (s0 + s1) / 2) * segment.area - towards * segment.v);
+};
+
+/** Places −1 < x < 1 at which the arc meets the line s = d, in order. */
+const crossings = ({ arc, middle, us, vs }: Curve, d: number): readonly number[] => {
+  // onChordArc put into s(x) = d, multiplied out: p·x² + q·x + r = 0.
+  const b = arc.bulge;
+  const h = (d - middle) / arc.half;
+  const p = -b * (vs + b * h);
+  const q = us * (1 + b * b);
+  const r = b * vs - h;
+  const square = q * q - 4 * p * r;
+  if (square <= 0) return [];
+  const w = -(q + (q < 0 ? -1 : 1) * Math.sqrt(square)) / 2;
+  return [w / p, r / w].filter((x) => x > -1 && x < 1).sort((x, y) => x - y);
+};
+
+const heightAt = ({ arc, middle, us, vs }: Curve, x: number): number => {
+  const { u, v } = onChordArc(arc, x);
+  return middle + us * u + vs * v;
 };
 
 const addCurve = (sum: Sum, curve: Curve, d: number): void => {
-  const { radius, start, sweep } = curve.arc;
-  const end = start + sweep;
-  const k = (d - curve.centre) / radius;
-  if (k <= -1) return;
-  if (k >= 1) return addStretch(sum, curve, start, end, d);
-  const gamma = Math.acos(k);
-  const [low, high] = [Math.min(start, end), Math.max(start, end)];
-  const turns = 2 * Math.PI;
-  for (let m = Math.floor((low + gamma) / turns) - 1; gamma + m * turns < high; m += 1) {
-    const a = Math.max(low, gamma + m * turns);
-    const b = Math.min(high, turns - gamma + m * turns);
-    if (b > a) addStretch(sum, curve, ...(sweep > 0 ? ([a, b] as const) : ([b, a] as const)), d);
+  const places = [-1, ...crossings(curve, d), 1];
+  for (let i = 0; i + 1 < places.length; i += 1) {
+    const [from = -1, to = 1] = [places[i], places[i + 1]];
+    // The ends of a stretch may lie on the line, and so may the middle of one that touches it: the furthest decides.
+    const heights = [from, (from + to) / 2, to].map((x) => heightAt(curve, x) - d);
+    const furthest = heights.reduce((far, h) => (Math.abs(h) > Math.abs(far) ? h : far));
+    if (furthest < 0) addStretch(sum, curve, from, to, d);
   }
 };
 
@@ -79,35 +105,30 @@ export const stripsAlong = (sets: readonly WeightedRegions[], normal: Point, ori
   const lines: Line[] = [];
   const curves: Curve[] = [];
   let [sMin, sMax] = [Infinity, -Infinity];
-  const turnBy = Math.atan2(normal.y, normal.x);
-  const sOf = (p: Point) => (p.x - origin.x) * normal.x + (p.y - origin.y) * normal.y;
-  const tOf = (p: Point) => (p.y - origin.y) * normal.x - (p.x - origin.x) * normal.y;
+  const across = (v: Point) => v.x * normal.x + v.y * normal.y;
+  const along = (v: Point) => v.y * normal.x - v.x * normal.y;
+  const sOf = (p: Point) => across({ x: p.x - origin.x, y: p.y - origin.y });
+  const reach = (s: number) => {
+    sMin = Math.min(sMin, s);
+    sMax = Math.max(sMax, s);
+  };
   const addEdge = (from: Vertex, to: Vertex, weight: number) => {
     const [s0, s1] = [sOf(from), sOf(to)];
-    const rise = tOf(to) - tOf(from);
-    sMin = Math.min(sMin, s0);
-    sMax = Math.max(sMax, s0);
-    const arc = arcOf(from, to);
+    reach(s0);
+    const arc = chordArcOf(from, to);
     if (arc === null) {
-      lines.push({ s0, s1, rise, weight });
+      lines.push({ s0, s1, rise: along({ x: to.x - from.x, y: to.y - from.y }), weight });
       return;
     }
-    const curve = {
-      s0,
-      s1,
-      rise,
-      weight,
-      centre: sOf(arc.centre),
-      arc: { ...arc, start: arc.start - turnBy },
-    };
+    const middle = sOf(arc.middle);
+    const [us, vs] = [across(arc.along), across(arc.towards)];
+    const curve: Curve = { arc, middle, us, vs, ut: along(arc.along), vt: along(arc.towards), weight };
     curves.push(curve);
-    const passes = (angle: number) => {
-      const turn = 2 * Math.PI;
-      const along = arc.sweep > 0 ? angle - curve.arc.start : curve.arc.start - angle;
-      return ((along % turn) + turn) % turn <= Math.abs(arc.sweep);
-    };
-    if (passes(0)) sMax = Math.max(sMax, curve.centre + arc.radius);
-    if (passes(Math.PI)) sMin = Math.min(sMin, curve.centre - arc.radius);
+    for (const direction of [normal, { x: -normal.x, y: -normal.y }]) {
+      const x = furthestOnChordArc(arc, direction);
+      if (x === null) continue;
+      reach(heightAt(curve, x));
+    }
   };
   for (const { regions, weight } of sets)
     for (const region of regions)
