@@ -3,7 +3,7 @@ import { Slot } from "radix-ui";
 import { cx } from "@/components/ui/cx";
 
 export type ButtonKind = "main" | "other" | "plain" | "danger";
-export type ButtonSize = "body" | "small" | "block";
+export type ButtonSize = "body" | "small" | "large";
 
 type Look = Readonly<{ kind?: ButtonKind; size?: ButtonSize }>;
 
@@ -16,7 +16,7 @@ const KIND: Record<ButtonKind, string> = {
 const SIZE: Record<ButtonSize, string> = {
   body: "h-7 px-3 text-body max-md:h-11",
   small: "h-6 px-[9px] text-table max-md:h-11",
-  block: "min-h-10 px-[18px] text-body max-md:px-4",
+  large: "h-10 px-[34px] text-lead max-md:h-11",
 };
 
 /** Class of a button; exported so that links can look like one. */
