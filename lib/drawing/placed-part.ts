@@ -1,0 +1,44 @@
+import { shapeRegions } from "@/lib/drawing/part-regions";
+import type { Drawing, DrawingPart } from "@/lib/drawing/schema";
+import { ringBox, type Box } from "@/lib/geometry/arc";
+import type { Region } from "@/lib/geometry/region";
+import { placeRegion } from "@/lib/geometry/ring";
+
+const placed = new WeakMap<DrawingPart, readonly Region[]>();
+
+/**
+ * Where a part lies in drawing axes (mm), before overlaps and cut-outs are dealt with; none where its shape is faulty.
+ * Remembered by the part's identity: edits make new objects of what they change.
+ */
+export const placedRegions = (part: DrawingPart): readonly Region[] => {
+  const known = placed.get(part);
+  if (known) return known;
+  const shape = shapeRegions(part.shape);
+  const regions = shape.ok ? shape.value.map((region) => placeRegion(region, part)) : [];
+  placed.set(part, regions);
+  return regions;
+};
+
+export const joinBoxes = (boxes: readonly Box[]): Box | null =>
+  boxes.length === 0
+    ? null
+    : boxes.reduce((sum, b) => ({
+        xMin: Math.min(sum.xMin, b.xMin),
+        xMax: Math.max(sum.xMax, b.xMax),
+        yMin: Math.min(sum.yMin, b.yMin),
+        yMax: Math.max(sum.yMax, b.yMax),
+      }));
+
+/** Box of a placed part, mm; null where its shape is faulty. */
+export const partBox = (part: DrawingPart): Box | null =>
+  joinBoxes(placedRegions(part).flatMap((r) => ringBox(r.outer) ?? []));
+
+/** Box of the parts with the given ids (all material without ids), mm; null where there is none. */
+export const boxOfParts = (drawing: Drawing, ids?: readonly string[]): Box | null =>
+  joinBoxes(
+    drawing.parts
+      .filter((p) => (ids ? ids.includes(p.id) : p.cutout !== true))
+      .flatMap((p) => partBox(p) ?? []),
+  );
+
+export const middleOf = (box: Box) => ({ x: (box.xMin + box.xMax) / 2, y: (box.yMin + box.yMax) / 2 });
