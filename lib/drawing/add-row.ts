@@ -1,7 +1,7 @@
 import { freeId } from "@/lib/drawing/edit-parts";
 import { boxOfParts, middleOf } from "@/lib/drawing/placed-part";
 import type { Drawing, DrawingPart, PartShape } from "@/lib/drawing/schema";
-import { MIN_SIZE_MM } from "@/lib/drawing/schema";
+import { MIN_SIZE_MM } from "@/lib/geometry/limits";
 import { err, ok, type Result } from "@/lib/result";
 import { parseLength, type LengthOptions } from "@/lib/units/parse-length";
 
@@ -42,7 +42,10 @@ export const parseRow = (text: string, options: LengthOptions): Result<PartShape
   if (!round) return ok({ kind: "plate", width: first, height: second ?? first });
   if (second === undefined) return ok({ kind: "round", diameter: first });
   if (2 * second >= first)
-    return err({ code: "row.noBore", detail: `A wall of ${second} mm leaves no bore in a diameter of ${first} mm.` });
+    return err({
+      code: "row.noBore",
+      detail: `A wall of ${second} mm leaves no bore in a diameter of ${first} mm.`,
+    });
   return ok({ kind: "round", diameter: first, wall: second });
 };
 
@@ -62,8 +65,8 @@ const NAME: Record<PartShape["kind"], string> = {
  */
 export const partFor = (drawing: Drawing, shape: PartShape, on?: string): DrawingPart => {
   const under = on === undefined ? boxOfParts(drawing) : boxOfParts(drawing, [on]);
-  const last = drawing.parts.findLast((p) => p.cutout !== true);
-  const material = last && last.cutout !== true ? last.material : drawing.reference;
+  const material =
+    drawing.parts.flatMap((p) => (p.cutout === true ? [] : [p.material])).at(-1) ?? drawing.reference;
   const { height } = sizeOf(shape);
   const name = shape.kind === "round" && shape.wall !== undefined ? "Tube" : NAME[shape.kind];
   return {

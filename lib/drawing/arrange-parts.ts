@@ -1,4 +1,5 @@
 import { addParts, freeId, movePartsBy } from "@/lib/drawing/edit-parts";
+import { renameShared } from "@/lib/drawing/rename-shared";
 import { boxOfParts, middleOf, partBox } from "@/lib/drawing/placed-part";
 import type { Drawing, DrawingPart } from "@/lib/drawing/schema";
 import type { Box } from "@/lib/geometry/arc";
@@ -35,7 +36,10 @@ const alignShift = (to: AlignTo, box: Box, whole: Box): Point => {
 export const alignParts = (drawing: Drawing, ids: readonly string[], to: AlignTo): Drawing => {
   const whole = boxOfParts(drawing, ids);
   if (!whole) return drawing;
-  return movePartsBy(drawing, new Map(boxed(drawing, ids).map(({ id, box }) => [id, alignShift(to, box, whole)])));
+  return movePartsBy(
+    drawing,
+    new Map(boxed(drawing, ids).map(({ id, box }) => [id, alignShift(to, box, whole)])),
+  );
 };
 
 /** Parts set one against the other in the order they lie: the first stays, each next one touches the one before. */
@@ -126,31 +130,12 @@ export const arrayParts = (drawing: Drawing, ids: readonly string[], copies: num
         id: names.get(p.id) ?? p.id,
         at: { x: clean(p.at.x + k * step.x), y: clean(p.at.y + k * step.y) },
       }));
-    const shared = groupTogether(parts, drawing, names);
     const joints = drawing.joints.flatMap((j) => {
       const [a, b] = j.between.map((id) => names.get(id));
       return a && b ? [{ ...j, between: [a, b] as [string, string] }] : [];
     });
-    next = { ...addParts(next, shared), joints: [...next.joints, ...joints] };
+    next = { ...addParts(next, renameShared(parts)), joints: [...next.joints, ...joints] };
     made.push(...names.values());
   }
   return { drawing: next, ids: made };
-};
-
-/** Parts copied from one group share one new group. */
-const groupTogether = (
-  parts: readonly DrawingPart[],
-  drawing: Drawing,
-  names: ReadonlyMap<string, string>,
-): DrawingPart[] => {
-  const renamed = new Map<string, string>();
-  for (const p of drawing.parts) {
-    const copy = names.get(p.id);
-    if (copy && p.group && !renamed.has(p.group)) renamed.set(p.group, `g-${copy}`);
-  }
-  const originals = new Map([...names].map(([from, to]) => [to, drawing.parts.find((p) => p.id === from)?.group]));
-  return parts.map((p) => {
-    const group = originals.get(p.id);
-    return group === undefined ? p : { ...p, group: renamed.get(group) ?? group };
-  });
 };

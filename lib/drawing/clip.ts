@@ -1,4 +1,5 @@
 import { addParts, freeId } from "@/lib/drawing/edit-parts";
+import { renameShared } from "@/lib/drawing/rename-shared";
 import type { Copied } from "@/lib/drawing/arrange-parts";
 import type { Drawing, DrawingMaterial } from "@/lib/drawing/schema";
 import type { Point } from "@/lib/geometry/region";
@@ -36,16 +37,14 @@ export const pasteClip = (drawing: Drawing, clip: Drawing, by: Point): Copied =>
   }
   const names = new Map<string, string>();
   for (const p of clip.parts) names.set(p.id, freeId(drawing, new Set(names.values())));
-  const groups = new Map<string, string>();
-  const parts = clip.parts.map((p) => {
-    const id = names.get(p.id) ?? p.id;
-    const at = { x: p.at.x + by.x, y: p.at.y + by.y };
-    if (p.group && !groups.has(p.group)) groups.set(p.group, `g-${id}`);
-    const group = p.group === undefined ? {} : { group: groups.get(p.group) ?? p.group };
-    return p.cutout === true
-      ? { ...p, ...group, id, at }
-      : { ...p, ...group, id, at, material: nameOf.get(p.material) ?? p.material };
-  });
+  const parts = renameShared(
+    clip.parts.map((p) => {
+      const placed = { id: names.get(p.id) ?? p.id, at: { x: p.at.x + by.x, y: p.at.y + by.y } };
+      return p.cutout === true
+        ? { ...p, ...placed }
+        : { ...p, ...placed, material: nameOf.get(p.material) ?? p.material };
+    }),
+  );
   const joints = clip.joints.flatMap((j) => {
     const [a, b] = j.between.map((id) => names.get(id));
     return a && b ? [{ ...j, between: [a, b] as [string, string] }] : [];

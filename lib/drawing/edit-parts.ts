@@ -67,7 +67,9 @@ export const groupParts = (drawing: Drawing, ids: readonly string[]): Drawing =>
   const used = new Set(drawing.parts.map((p) => p.group));
   let n = 1;
   while (used.has(`g${n}`)) n++;
-  return ids.length < 2 ? drawing : withParts(drawing, (p) => (ids.includes(p.id) ? { ...p, group: `g${n}` } : p));
+  return ids.length < 2
+    ? drawing
+    : withParts(drawing, (p) => (ids.includes(p.id) ? { ...p, group: `g${n}` } : p));
 };
 
 export const ungroupParts = (drawing: Drawing, ids: readonly string[]): Drawing =>

@@ -28,7 +28,8 @@ export const commit = <T>(h: History<T>): History<T> => {
 };
 
 /** Goes back to the mark: Escape. */
-export const bail = <T>(h: History<T>): History<T> => (h.mark === null ? h : { ...h, now: h.mark, mark: null });
+export const bail = <T>(h: History<T>): History<T> =>
+  h.mark === null ? h : { ...h, now: h.mark, mark: null };
 
 /** One step back; a gesture that is going on is given up first. */
 export const undo = <T>(h: History<T>): History<T> => {
