@@ -9,6 +9,9 @@ const TIMES = /\s*[x×]\s*/i;
 const TRAILING_UNIT = /(?:mm|cm|m|in|ft|"|')\s*$/i;
 const ROUND = /^(?:Ø|dia\.?|d|round|tube)\s*(?=[\d.,])/i;
 
+/** A typed length kept to a picometre, so that 12 in is 304.8 mm and not its neighbour in binary. */
+export const typedMm = (mm: number): number => Math.round(mm * 1e9) / 1e9;
+
 const sizes = (text: string, options: LengthOptions): Result<number[]> => {
   const pieces = text.split(TIMES);
   const unit = TRAILING_UNIT.exec(pieces.at(-1) ?? "")?.[0].trim();
@@ -19,7 +22,7 @@ const sizes = (text: string, options: LengthOptions): Result<number[]> => {
     if (!length.ok) return length;
     if (length.value.mm < MIN_SIZE_MM)
       return err({ code: "row.noSize", detail: `"${piece.trim()}" is no size: type one above 0.` });
-    found.push(length.value.mm);
+    found.push(typedMm(length.value.mm));
   }
   return ok(found);
 };
