@@ -1,0 +1,46 @@
+import type { NodedEdge, Noding } from "@/lib/geometry/noding";
+import { TOUCH_MM } from "@/lib/geometry/tolerance";
+
+/** An edge of a noding with what it belongs to. `index` counts the edges of all rings in order. */
+export type OwnedEdge = Readonly<{ index: number; part: number; ring: number; edge: NodedEdge }>;
+
+/** Every edge of a noding, in the order of its rings. */
+export const ownedEdges = ({ rings }: Noding): readonly OwnedEdge[] => {
+  let index = 0;
+  return rings.flatMap(({ part, edges }, ring) =>
+    edges.map((edge) => ({ index: index++, part, ring, edge })),
+  );
+};
+
+/** Height of an edge over its chord, mm, seen from the lower node to the higher: equal for equal curves run either way. */
+const heightOf = ({ nodes }: Noding, { from, to, bulge }: NodedEdge): number => {
+  const [a, b] = [nodes[from], nodes[to]];
+  if (bulge === 0 || a === undefined || b === undefined) return 0;
+  return (Math.hypot(b.x - a.x, b.y - a.y) / 2) * bulge * (from < to ? 1 : -1);
+};
+
+/**
+ * Groups of edges that run along each other from node to node: each edge with the edges that coincide with it within
+ * `TOUCH_MM`, itself first. Edges alone in their group are included.
+ */
+export const edgeGroups = (noding: Noding): readonly (readonly OwnedEdge[])[] => {
+  const groups: OwnedEdge[][] = [];
+  const byEnds = new Map<number, OwnedEdge[][]>();
+  const count = noding.nodes.length;
+  for (const owned of ownedEdges(noding)) {
+    const { from, to } = owned.edge;
+    const key = Math.min(from, to) * count + Math.max(from, to);
+    const here = byEnds.get(key) ?? [];
+    if (here.length === 0) byEnds.set(key, here);
+    const height = heightOf(noding, owned.edge);
+    const group = here.find(
+      ([first]) => first !== undefined && Math.abs(heightOf(noding, first.edge) - height) <= TOUCH_MM,
+    );
+    if (group === undefined) {
+      const fresh = [owned];
+      here.push(fresh);
+      groups.push(fresh);
+    } else group.push(owned);
+  }
+  return groups;
+};
