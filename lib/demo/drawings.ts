@@ -1,4 +1,5 @@
-import type { Drawing, DrawingMaterial, DrawingPart, Profile } from "@/lib/drawing/schema";
+import type { Drawing, DrawingMaterial, DrawingPart } from "@/lib/drawing/schema";
+import type { Profile } from "@/lib/profiles/families";
 
 /** Invented grades: they are named by their stress and claim no standard. Common practice for E, G and density. */
 export const STEEL: DrawingMaterial = {

@@ -1,4 +1,4 @@
-import type { FamilyDimensions } from "@/lib/drawing/schema";
+import type { FamilyDimensions } from "@/lib/profiles/families";
 import { profileDrawing } from "./drawings";
 import type { DemoShape } from "./shape";
 
@@ -64,24 +64,32 @@ const heavier = ([depth, width, web, flange, root]: Serial, weight: number): ISe
   };
 };
 
-/** Mass for the designation only; the figures of the shape are the engine's. Two flanges, web, `corners` fillets. */
-const nominalMass = (d: ISection, flanges: 1 | 2): number => {
+const PIECES = {
+  "i-section": { flanges: 2, fillets: 4 },
+  channel: { flanges: 2, fillets: 2 },
+  tee: { flanges: 1, fillets: 2 },
+} as const;
+type RolledFamily = keyof typeof PIECES;
+
+/** Mass for the designation only: flanges, web and fillets. The figures of the shape are the engine's. */
+const nominalMass = (d: ISection, family: RolledFamily): number => {
+  const { flanges, fillets } = PIECES[family];
   const web = (d.depth - flanges * d.flangeThickness) * d.webThickness;
-  const fillets = flanges * 2 * (1 - Math.PI / 4) * d.rootRadius ** 2;
-  return ((flanges * d.flangeWidth * d.flangeThickness + web + fillets) * DENSITY_KG_PER_M3) / 1e6;
+  const corners = fillets * (1 - Math.PI / 4) * d.rootRadius ** 2;
+  return ((flanges * d.flangeWidth * d.flangeThickness + web + corners) * DENSITY_KG_PER_M3) / 1e6;
 };
 
 const rolled = (
   prefix: string,
   title: string,
   serials: readonly Serial[],
-  family: "i-section" | "channel" | "tee",
+  family: RolledFamily,
   bay: DemoShape["bay"],
 ): DemoShape[] =>
   serials.flatMap((serial) =>
     (family === "i-section" ? WEIGHTS : WEIGHTS.slice(0, 2)).map((weight) => {
       const dimensions = heavier(serial, weight);
-      const mass = nominalMass(dimensions, family === "tee" ? 1 : 2);
+      const mass = nominalMass(dimensions, family);
       const size = `${prefix} ${serial[0]}x${serial[1]}`;
       const designation = `${size}x${mass < 100 ? tenth(mass) : Math.round(mass)}`;
       return { designation, title, bay, family, drawing: profileDrawing(title, { family, dimensions }) };
