@@ -1,0 +1,19 @@
+"use client";
+import { useCallback, useSyncExternalStore } from "react";
+
+/** Whether a media query holds; false on the server and until the page is alive. */
+export function useMedia(query: string): boolean {
+  const subscribe = useCallback(
+    (onChange: () => void) => {
+      const media = window.matchMedia(query);
+      media.addEventListener("change", onChange);
+      return () => media.removeEventListener("change", onChange);
+    },
+    [query],
+  );
+  return useSyncExternalStore(
+    subscribe,
+    () => window.matchMedia(query).matches,
+    () => false,
+  );
+}
