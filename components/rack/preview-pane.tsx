@@ -20,6 +20,7 @@ import type { PropertyKey } from "@/lib/units/property-units";
 // The figure brings geometry and the clipper with it: late, so that the list stands first.
 const ShapeFigure = dynamic(() => import("@/components/rack/shape-figure"), { ssr: false });
 
+const FIT = { width: 360, height: 298 };
 const SHOW: FigureShow = { dimensions: true, axes: true, balloons: false, centroidDimension: true };
 
 type PreviewProps = Readonly<{
@@ -58,8 +59,7 @@ export function PreviewPane({ row, bay, compared, canCompare, onCompare }: Previ
             <ShapeFigure
               drawing={revision.drawing}
               properties={properties}
-              width={360}
-              height={298}
+              fit={FIT}
               label={`Section of ${row.designation}`}
               show={SHOW}
             />
@@ -123,7 +123,7 @@ function PreviewRow({
   strong?: boolean;
 }) {
   return (
-    <div className="grid h-6 grid-cols-[minmax(0,1fr)_48px_96px_72px] items-center gap-1 border-b border-rule pl-3">
+    <div className="grid h-6 grid-cols-[minmax(0,1fr)_36px_88px_66px] items-center gap-1 border-b border-rule pl-3">
       <dt className="contents">
         <span className="truncate text-ink-2">{PROPERTY_NAME[property]}</span>
         <SymbolOf property={property} />

@@ -69,7 +69,7 @@ export function RackTitleBlock(props: RackTitleBlockProps) {
           </>
         )}
       </Cell>
-      <Cell label="Keys" fill stays="xl" className={compared.length > 0 ? "" : "border-r-0!"}>
+      <Cell label="Keys" fill stays="xl">
         <span className="inline-flex items-center gap-1">
           <Kbd>
             <Arrow to="up" />

@@ -97,7 +97,7 @@ export function ShapeTable(props: ShapeTableProps) {
                     {facts.sort ? (
                       <button
                         type="button"
-                        className="min-h-[18px] font-[inherit] hover:underline"
+                        className="min-h-[18px] [font:inherit] hover:underline"
                         onClick={() => facts.sort && onSort(nextSort(sort, facts.sort))}
                       >
                         {facts.head}

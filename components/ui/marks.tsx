@@ -75,13 +75,13 @@ export const Stamp = ({
   className,
 }: {
   word: string;
-  lines: readonly string[];
+  lines: readonly ReactNode[];
   className?: string;
 }) => (
   <div className={cx("stamp bg-sheet px-5 pt-2.5 pb-[9px] text-center", className)}>
     <b className="block text-[25px] leading-[27px] font-[760] tracking-[.09em] uppercase">{word}</b>
-    {lines.map((line) => (
-      <span key={line} className="block font-num text-[12px] leading-[17px] font-[500]">
+    {lines.map((line, i) => (
+      <span key={i} className="block font-num text-[12px] leading-[17px] font-[500]">
         {line}
       </span>
     ))}

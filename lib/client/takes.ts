@@ -1,5 +1,5 @@
 "use client";
-import { useQuery } from "@tanstack/react-query";
+import { useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
 import { api } from "@/lib/client/api";
 import { queryKeys } from "@/lib/client/query-keys";
 
@@ -17,9 +17,36 @@ export type TakeItem = Readonly<{
   at: string;
 }>;
 
+export type NewTake = Readonly<{
+  ordinal: number;
+  jobNumber: string;
+  jobName: string;
+  pieceMark: string;
+  quantity: number;
+  lengthMm: number | null;
+}>;
+
+const takesKey = (shapeId: string) => [...queryKeys.shape(shapeId), "takes"];
+
 export const useTakes = (shapeId: string) =>
   useQuery({
-    queryKey: [...queryKeys.shape(shapeId), "takes"],
+    queryKey: takesKey(shapeId),
     queryFn: async ({ signal }) =>
       (await api.get<{ items: readonly TakeItem[] }>(`/shapes/${shapeId}/takes`, { signal })).data.items,
   });
+
+export function useRecordTake(shapeId: string) {
+  const cache = useQueryClient();
+  return useMutation({
+    mutationFn: (take: NewTake) => api.post(`/shapes/${shapeId}/takes`, { body: take }),
+    onSuccess: () => cache.invalidateQueries({ queryKey: takesKey(shapeId) }),
+  });
+}
+
+export function useTakeOff(shapeId: string) {
+  const cache = useQueryClient();
+  return useMutation({
+    mutationFn: (id: string) => api.delete(`/shapes/${shapeId}/takes/${id}`),
+    onSuccess: () => cache.invalidateQueries({ queryKey: takesKey(shapeId) }),
+  });
+}
