@@ -14,6 +14,7 @@ const TABLE: Record<string, readonly string[]> = {
   "lib/result": [],
   "lib/errors": ["lib/result"],
   "lib/env": ["lib/result", "lib/errors"],
+  "lib/logger": ["lib/env"],
   ...Object.fromEntries(
     PURE.map((f, i) => [`lib/${f}`, [...BASE, ...PURE.slice(0, i).map((g) => `lib/${g}`)]]),
   ),
@@ -24,7 +25,9 @@ const TABLE: Record<string, readonly string[]> = {
   "lib/schemas": [...BASE, "lib/env", ...PURE_ALL],
   "lib/permissions": [...BASE, "lib/env", ...PURE_ALL, "lib/schemas"],
   db: ["lib/schemas", "lib/errors", "lib/result", "lib/permissions", "lib/env"],
-  ...Object.fromEntries(SERVER_CHAIN.map((f, i) => [f, [...SCHEMAS, "db", ...SERVER_CHAIN.slice(0, i)]])),
+  ...Object.fromEntries(
+    SERVER_CHAIN.map((f, i) => [f, [...SCHEMAS, "db", "lib/logger", ...SERVER_CHAIN.slice(0, i)]]),
+  ),
   "lib/demo": ["lib", "db"],
   "lib/commands": ["lib", "db"],
   "lib/start": [],
