@@ -1,5 +1,6 @@
 import "server-only";
 import { AppError } from "@/lib/errors";
+import type { Unparsed } from "@/lib/services/context";
 
 /** Largest JSON body: a drawing of 20,000 vertices needs about 1.5 MB. */
 export const MAX_JSON_BYTES = 4 * 1024 * 1024;
@@ -32,15 +33,15 @@ const refuseProto = (key: string, value: unknown): unknown => {
   return value;
 };
 
-/** The JSON of a body: application/json only, UTF-8 only, broken JSON is 400. */
-export const readJson = async (request: Request): Promise<unknown> => {
+/** The JSON of a body: application/json only, UTF-8 only, broken JSON is 400. The cast is safe: an Unparsed value can only be parsed. */
+export const readJson = async (request: Request): Promise<Unparsed> => {
   const type = request.headers.get("content-type") ?? "";
   if (!/^application\/json\s*(;\s*charset\s*=\s*"?utf-8"?\s*)?$/i.test(type)) {
     throw new AppError("wrongType", { user: "Send application/json." });
   }
   const bytes = await readBytes(request, MAX_JSON_BYTES);
   try {
-    return JSON.parse(new TextDecoder("utf-8", { fatal: true }).decode(bytes), refuseProto) as unknown;
+    return JSON.parse(new TextDecoder("utf-8", { fatal: true }).decode(bytes), refuseProto) as Unparsed;
   } catch (cause) {
     throw new AppError("unreadable", { user: "The body is not valid JSON in UTF-8.", cause });
   }

@@ -4,7 +4,7 @@ import { authenticate } from "@/lib/auth/authenticate";
 import { AppError } from "@/lib/errors";
 import { logger } from "@/lib/logger";
 import { VERBS, type Verb } from "@/lib/permissions";
-import type { Ctx, OpenCtx } from "@/lib/services/context";
+import type { Ctx, OpenCtx, Unparsed } from "@/lib/services/context";
 import { newId } from "@/lib/services/new-id";
 import { notFound } from "@/lib/services/not-found";
 import { readJson } from "./body";
@@ -21,8 +21,8 @@ type Args = Readonly<{
   params: Params;
   /** The query string; a parameter given several times is joined by commas. */
   query: Readonly<Record<string, string>>;
-  /** The JSON body, unparsed by any schema: the verb does that. Undefined unless `body` was asked for. */
-  body: unknown;
+  /** The JSON body, for the verb to parse; empty unless `body` was asked for. */
+  body: Unparsed;
   /** The version of If-Match; 0 unless `version` was asked for. */
   version: number;
   /** The open session's public id; null for tokens. */
@@ -56,12 +56,15 @@ const paramsOf = async (context: NextContext): Promise<Params> =>
 
 const isChange = (request: Request): boolean => !["GET", "HEAD", "OPTIONS"].includes(request.method);
 
+/** For routes without a body; a verb that parses it refuses it. */
+const nothing = {} as Unparsed;
+
 const argsOf = async (request: Request, context: NextContext, options: Options) => ({
   request,
   params: await paramsOf(context),
   query: queryOf(request),
   version: options.version ? requireVersion(request) : 0,
-  body: options.body ? await readJson(request) : undefined,
+  body: options.body ? await readJson(request) : nothing,
 });
 
 type Ids = Readonly<{ requestId: string; verb: Verb; person?: string; organisation?: string }>;

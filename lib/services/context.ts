@@ -8,8 +8,15 @@ export type Ctx = Readonly<{ actor: Actor; db: Db; now: number; requestId: strin
 /** Verbs that anyone may call (sign in, accept an invitation) have no actor. */
 export type OpenCtx = Omit<Ctx, "actor">;
 
+declare const unparsed: unique symbol;
+/** What came in a body and no schema has seen yet: all a verb can do with it is parse it. */
+export type Unparsed = Readonly<{ [unparsed]: true }>;
+
 /** One verb, one signature: the context, the input to be parsed, and the ids and version of the thing it is about. */
-export type VerbArgs<Input, Address extends object = object> = Readonly<{ ctx: Ctx; input: Input }> &
+export type VerbArgs<Input, Address extends object = object> = Readonly<{
+  ctx: Ctx;
+  input: Input | Unparsed;
+}> &
   Readonly<Address>;
 
 /** What a change must name: the version it was made from (If-Match). */

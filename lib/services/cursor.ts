@@ -7,29 +7,26 @@ export type CursorValue = string | number | null;
 export const encodeCursor = (values: readonly CursorValue[]): string =>
   Buffer.from(JSON.stringify(values)).toString("base64url");
 
+export const unknownPlace = (cause?: unknown): AppError =>
+  new AppError("invalid", {
+    user: "cursor: this is not a place in this list; begin at its start.",
+    issues: [
+      { code: "cursor.unknown", detail: "Not a place in this list; begin at its start.", pointer: "/cursor" },
+    ],
+    cause,
+  });
+
 /** Reads a cursor of `length` values; anything else is refused by name. */
 export const decodeCursor = (text: string, length: number): readonly CursorValue[] => {
-  const refuse = (cause?: unknown) =>
-    new AppError("invalid", {
-      user: "cursor: this is not a place in this list; begin at its start.",
-      issues: [
-        {
-          code: "cursor.unknown",
-          detail: "Not a place in this list; begin at its start.",
-          pointer: "/cursor",
-        },
-      ],
-      cause,
-    });
   let read: unknown;
   try {
     read = JSON.parse(Buffer.from(text, "base64url").toString("utf8"));
   } catch (cause) {
-    throw refuse(cause);
+    throw unknownPlace(cause);
   }
   const fits = (value: unknown): value is CursorValue =>
     value === null || typeof value === "string" || (typeof value === "number" && Number.isFinite(value));
-  if (!Array.isArray(read) || read.length !== length || !read.every(fits)) throw refuse();
+  if (!Array.isArray(read) || read.length !== length || !read.every(fits)) throw unknownPlace();
   return read;
 };
 

@@ -2,6 +2,7 @@ import "server-only";
 import type { z } from "zod";
 import { AppError } from "@/lib/errors";
 import type { Fault } from "@/lib/result";
+import { plainDetail } from "./plain-detail";
 
 const pointerOf = (path: readonly PropertyKey[]): string =>
   path.map((step) => `/${String(step).replaceAll("~", "~0").replaceAll("/", "~1")}`).join("");
@@ -19,7 +20,7 @@ const faultsOf = (issue: z.core.$ZodIssue): Fault[] => {
     const nearest = issue.errors.reduce((a, b) => (b.length < a.length ? b : a));
     return nearest.flatMap((inner) => faultsOf({ ...inner, path: [...issue.path, ...inner.path] }));
   }
-  return [{ code: `field.${issue.code}`, detail: issue.message, pointer: pointerOf(issue.path) }];
+  return [{ code: `field.${issue.code}`, detail: plainDetail(issue), pointer: pointerOf(issue.path) }];
 };
 
 const MAX_ISSUES = 50;

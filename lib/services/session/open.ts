@@ -12,7 +12,7 @@ import { closeSession, createSession } from "@/lib/auth/sessions";
 import { AppError } from "@/lib/errors";
 import { SignInInput } from "@/lib/schemas/session";
 import type { Actor } from "@/lib/schemas/access";
-import type { OpenCtx } from "../context";
+import type { OpenCtx, Unparsed } from "../context";
 import { logDeed } from "../log-deed";
 import { parseInput } from "../parse-input";
 
@@ -48,7 +48,7 @@ export const openSession = async ({
   from,
 }: {
   ctx: OpenCtx;
-  input: z.input<typeof SignInInput>;
+  input: z.input<typeof SignInInput> | Unparsed;
   from: From;
 }): Promise<SignedIn> => {
   const { email: typed, password, organisation } = parseInput(SignInInput, input);
