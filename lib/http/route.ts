@@ -13,7 +13,8 @@ import { asAppError, problemResponse } from "./problem";
 import { requireVersion } from "./version";
 
 type Params = Readonly<Record<string, string>>;
-type NextContext = Readonly<{ params: Promise<Record<string, string | string[] | undefined>> }>;
+/** Next gives no params at all to a route without any. */
+type NextContext = Readonly<{ params: Promise<Record<string, string | string[] | undefined> | undefined> }>;
 type Handler = (request: Request, context: NextContext) => Promise<Response>;
 
 type Args = Readonly<{
@@ -51,7 +52,7 @@ const queryOf = (request: Request): Record<string, string> => {
 
 const paramsOf = async (context: NextContext): Promise<Params> =>
   Object.fromEntries(
-    Object.entries(await context.params).map(([name, value]) => [name, String(value ?? "")]),
+    Object.entries((await context.params) ?? {}).map(([name, value]) => [name, String(value ?? "")]),
   );
 
 const isChange = (request: Request): boolean => !["GET", "HEAD", "OPTIONS"].includes(request.method);

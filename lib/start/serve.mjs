@@ -46,7 +46,13 @@ main(async () => {
   const { port } = server.address();
   const app = next({ dev: false, dir: ROOT, hostname: address.host, port });
   const handler = prepared(app).then(() => app.getRequestHandler());
-  server.on("request", async (request, response) => (await handler)(request, response));
+  server.on("request", async (request, response) => {
+    // Who is at the other end of the socket; a header of that name from outside is overwritten.
+    request.headers["x-peer-address"] = request.socket.remoteAddress ?? "unknown";
+    await (
+      await handler
+    )(request, response);
+  });
   await handler;
   const shown = address.host.includes(":") ? `[${address.host}]` : address.host;
   process.stdout.write(`Flitchbook is at http://${shown}:${port}\n`);
