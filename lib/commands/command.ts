@@ -1,50 +1,53 @@
 import "server-only";
-import { database, type Db } from "@/db/client";
-import { NewerDatabase } from "@/db/migrate";
-import { AppError } from "@/lib/errors";
+import { closeDatabase, database, type Db } from "@/db/client";
+import { databaseRefusal, prepareDatabase } from "@/db/prepare";
 import { environment } from "@/lib/env";
+import { AppError } from "@/lib/errors";
 
 /** A refusal of a command: its message is the one line that is printed. */
 export class CommandRefusal extends Error {}
 
-const codeOf = (error: unknown): string => {
-  if (typeof error !== "object" || error === null) return "";
-  const own = "code" in error ? String(error.code) : "";
-  return own.startsWith("SQLITE") || !("cause" in error) ? own : codeOf(error.cause) || own;
-};
-
-/** One clear line for whatever ended a command; an unexpected error keeps its stack. */
-export const lineOf = (error: unknown, databaseUrl: string): string => {
-  const said = error instanceof Error ? error.message : String(error);
-  if (error instanceof CommandRefusal) return said;
-  if (error instanceof NewerDatabase)
-    return `The database ${databaseUrl} was written by a newer version of the program. Start that version, or restore a backup.`;
+const lineOf = (error: unknown): string => {
   if (error instanceof AppError) return error.user;
-  const code = codeOf(error);
-  if (/NOTADB|CORRUPT/.test(code) || /malformed|not a database|is damaged/.test(said))
-    return `The database ${databaseUrl} is damaged. Restore a backup, or move the file away to begin anew.`;
-  if (
-    /READONLY|CANTOPEN|EACCES|EROFS|EPERM|ENOTDIR|ENOENT/.test(code) ||
-    /readonly|unable to open/i.test(said)
-  )
-    return `The database ${databaseUrl} cannot be opened for writing. Give this user write access to the file and its folder.`;
-  if (/^Environment: /.test(said)) return said;
-  return error instanceof Error ? (error.stack ?? said) : said;
+  if (!(error instanceof Error)) return String(error);
+  return error instanceof CommandRefusal ? error.message : (error.stack ?? error.message);
 };
 
-/** Runs a command with the configured database, closes it, and sets the exit code: 0, or 1 with one line on stderr. */
-export const runCommand = async (work: (db: Db) => Promise<void>): Promise<void> => {
-  let url = "";
+/** Runs to its end, or writes one line on stderr and sets the exit code to 1. */
+export const guarded = async (work: () => Promise<void>): Promise<void> => {
   try {
-    url = environment().DATABASE_URL;
-    const db = await database();
-    try {
-      await work(db);
-    } finally {
-      await db.close();
-    }
+    await work();
   } catch (error) {
-    process.stderr.write(`${lineOf(error, url)}\n`);
+    process.stderr.write(`${lineOf(error)}\n`);
     process.exitCode = 1;
+  }
+};
+
+const databaseUrl = (): string => {
+  try {
+    return environment().DATABASE_URL;
+  } catch (error) {
+    throw new CommandRefusal(error instanceof Error ? error.message : String(error));
+  }
+};
+
+const opened = async (): Promise<Db> => {
+  const url = databaseUrl();
+  try {
+    const db = await database();
+    await prepareDatabase(db);
+    return db;
+  } catch (error) {
+    throw new CommandRefusal(databaseRefusal(error, url));
+  }
+};
+
+/** Runs a command with the configured database, whole, ours and migrated, and closes it. */
+export const withDatabase = async (work: (db: Db) => Promise<void>): Promise<void> => {
+  const db = await opened();
+  try {
+    await work(db);
+  } finally {
+    await closeDatabase();
   }
 };
