@@ -8,7 +8,7 @@ import type { Noding } from "@/lib/geometry/noding";
 import { nodeParts, regionsOfParts } from "@/lib/geometry/noding";
 import type { Point } from "@/lib/geometry/region";
 import { resolveOverlaps } from "@/lib/geometry/resolve-overlaps";
-import { edgeGroups } from "@/lib/geometry/shared-edges";
+import { alignEdges, edgeGroups } from "@/lib/geometry/shared-edges";
 import type { Fault, Result } from "@/lib/result";
 import { err, ok } from "@/lib/result";
 
@@ -87,7 +87,7 @@ export const arrange = (
   origin: Point = { x: 0, y: 0 },
 ): Result<Arrangement, readonly Fault[]> => {
   const all = [...parts, ...cutouts];
-  const drawn = nodeParts(all.map(({ regions }) => regions));
+  const drawn = alignEdges(nodeParts(all.map(({ regions }) => regions)));
   const found = findOverlaps(drawn, all.length);
   if (!found.ok) return err([found.error]);
   const faults = [...tooMany(found.value.overlaps), ...mixedMaterials(parts, found.value.overlaps)];
@@ -125,5 +125,6 @@ const settle = (
   const resolved = resolveOverlaps(drawn, found, parts, cutouts);
   if (!resolved.ok) return resolved;
   const { regions, warnings } = resolved.value;
-  return ok({ noding: nodeParts([...regions, ...cutouts.map((cutout) => cutout.regions)]), warnings });
+  const noding = alignEdges(nodeParts([...regions, ...cutouts.map((cutout) => cutout.regions)]));
+  return ok({ noding, warnings });
 };

@@ -1,0 +1,58 @@
+import { expect } from "vitest";
+import { perimeterOf } from "@/lib/geometry/perimeter";
+import type { Region } from "@/lib/geometry/region";
+import { edgeLength } from "@/lib/geometry/arc";
+import type { TouchingPlates } from "@/tests/helpers/assemblies";
+import { expectRel } from "@/tests/helpers/expect-rel";
+import { areaOf, arranged, cutoutOf, partOf } from "@/tests/helpers/parts";
+
+/** Rounding of the placement (1e-12 mm on 5 m) over the least plate (3 mm), with room for sums. */
+const TOUCH_REL = 1e-11;
+
+/** Touching plates are one body with one outline without a crack, and touch over their whole common length. */
+export const holdsTogether = ({ plates, contact, area, perimeter }: TouchingPlates): void => {
+  const { outline, bodies, contacts, warnings } = arranged(plates.map((p, i) => partOf(`p${i}`, [p])));
+  expect(bodies).toEqual([[0, 1]]);
+  expect(warnings).toEqual([]);
+  expect(outline.map(({ holes }) => holes.length)).toEqual([0]);
+  expectRel(areaOf(outline), area, { rel: TOUCH_REL, name: "area" });
+  expectRel(perimeterOf(outline).outer, perimeter, { rel: TOUCH_REL, name: "perimeter" });
+  const touching = contacts.flatMap(({ lines }) => lines);
+  expectRel(
+    touching.reduce((sum, { from, to }) => sum + edgeLength(from, to), 0),
+    contact,
+    { rel: 1e-9, name: "contact" },
+  );
+};
+
+const IDENTITY_REL = 1e-9;
+
+/** |A∪B| + |A∩B| = |A| + |B|, each of the three found by an arrangement of its own. */
+export const addsUp = (a: Region, b: Region): void => {
+  const union = areaOf(arranged([partOf("a", [a]), partOf("b", [b])]).outline);
+  const rest = areaOf(arranged([partOf("a", [a])], [cutoutOf("b", [b])]).outline);
+  const [areaA, areaB] = [areaOf([a]), areaOf([b])];
+  expectRel(union + (areaA - rest), areaA + areaB, { rel: IDENTITY_REL });
+};
+
+/** The parts of an assembly no longer overlap, fill their outline, and do so whatever their order. */
+export const fillsItsOutline = (regions: readonly Region[]): void => {
+  const parts = regions.map((region, i) => partOf(`p${i}`, [region]));
+  const { parts: settled, outline } = arranged(parts);
+  const area = areaOf(outline);
+  expectRel(
+    settled.reduce((sum, list) => sum + areaOf(list), 0),
+    area,
+    { rel: IDENTITY_REL, name: "sum of parts" },
+  );
+  const turned = arranged(parts.toReversed());
+  expectRel(areaOf(turned.outline), area, { rel: IDENTITY_REL, name: "other order" });
+  turned.parts.toReversed().forEach((list, i) =>
+    expectRel(areaOf(list), areaOf(settled[i] ?? []), {
+      rel: IDENTITY_REL,
+      scale: area,
+      name: `part ${i}`,
+    }),
+  );
+  expect(turned.bodies.length).toBe(arranged(parts).bodies.length);
+};
