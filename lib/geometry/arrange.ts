@@ -4,9 +4,11 @@ import type { Bodies, NameOf } from "@/lib/geometry/contacts";
 import { bodiesOf, outlineOf, separationNotices, sharedLines } from "@/lib/geometry/contacts";
 import type { Overlaps, Pair } from "@/lib/geometry/find-overlaps";
 import { findOverlaps } from "@/lib/geometry/find-overlaps";
+import { neighbourBoxes } from "@/lib/geometry/neighbours";
 import type { Noding } from "@/lib/geometry/noding";
 import { nodeParts, regionsOfParts } from "@/lib/geometry/noding";
-import type { Point } from "@/lib/geometry/region";
+import type { Point, Region } from "@/lib/geometry/region";
+import { regionArea } from "@/lib/geometry/ring";
 import { resolveOverlaps } from "@/lib/geometry/resolve-overlaps";
 import { alignEdges, edgeGroups } from "@/lib/geometry/shared-edges";
 import type { Fault, Result } from "@/lib/result";
@@ -14,6 +16,9 @@ import { err, ok } from "@/lib/result";
 
 /** Pairs of overlapping parts beyond this are refused: each may need a clip of its own. */
 export const MAX_OVERLAPS = 5_000;
+
+/** Share by which the settled parts may differ in area from the outline that they fill; more is refused, not passed on. */
+const FILL_REL = 1e-8;
 
 const mixedMaterials = (parts: readonly ArrangePart[], overlaps: readonly Pair[]): readonly Fault[] =>
   overlaps.flatMap(([i, k]) => {
@@ -78,7 +83,7 @@ const partedNotice = (
  * are the true crossings of lines and arcs.
  * @param parts regions directed as `Region` asks, mm, about an origin near the drawing.
  * @param origin where that origin lies in the drawing; only words use it.
- * @returns faults (`overlap.differentMaterials`, `arrangement.tooManyOverlaps`, `arrangement.tooDense`, `clip.failed`)
+ * @returns faults (`overlap.differentMaterials`, `arrangement.tooManyOverlaps`, `arrangement.tooDense`, `clip.failed`, `arrangement.inexact`)
  * that name parts by id, or the arrangement.
  */
 export const arrange = (
@@ -87,8 +92,9 @@ export const arrange = (
   origin: Point = { x: 0, y: 0 },
 ): Result<Arrangement, readonly Fault[]> => {
   const all = [...parts, ...cutouts];
+  const neighbours = neighbourBoxes(all.map(({ regions }) => regions));
   const drawn = alignEdges(nodeParts(all.map(({ regions }) => regions)));
-  const found = findOverlaps(drawn, all.length);
+  const found = findOverlaps(drawn, neighbours);
   if (!found.ok) return err([found.error]);
   const faults = [...tooMany(found.value.overlaps), ...mixedMaterials(parts, found.value.overlaps)];
   if (faults.length > 0) return err(faults);
@@ -103,13 +109,25 @@ export const arrange = (
   if (!parted.ok) return parted;
   const separate =
     parted.value.length > 0 ? [] : separationNotices(noding, bodies, found.value.grazes, nameOf, origin);
+  const outline = outlineOf(noding, isPart);
+  const [inParts, inOutline] = [areaOf(regions.flat()), areaOf(outline)];
+  if (!(Math.abs(inParts - inOutline) <= FILL_REL * inParts)) return err([inexact]);
   return ok({
     parts: regions,
-    outline: outlineOf(noding, isPart),
+    outline,
     contacts: sharedLines(noding).filter(({ parts: [, b] }) => isPart(b)),
     bodies: bodies.parts,
     warnings: [...warnings, ...parted.value, ...separate],
   });
+};
+
+const areaOf = (regions: readonly Region[]): number =>
+  regions.reduce((sum, region) => sum + regionArea(region), 0);
+
+const inexact: Fault = {
+  code: "arrangement.inexact",
+  detail:
+    "The parts could not be arranged without gaps or overlaps. Move one of those that overlap a little, or join them in one outline.",
 };
 
 type Settled = Readonly<{ noding: Noding; warnings: readonly Notice[] }>;

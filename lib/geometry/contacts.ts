@@ -5,7 +5,7 @@ import type { NodedEdge, Noding } from "@/lib/geometry/noding";
 import type { Point, Region } from "@/lib/geometry/region";
 import { ringArea } from "@/lib/geometry/ring";
 import type { OwnedEdge } from "@/lib/geometry/shared-edges";
-import { edgeGroups } from "@/lib/geometry/shared-edges";
+import { edgeGroups, isShared } from "@/lib/geometry/shared-edges";
 import { regionsOfRings, ringOfEdges, traceRings } from "@/lib/geometry/trace";
 
 const lineOf = (nodes: readonly Point[], { from, to, bulge }: NodedEdge): SharedLine => {
@@ -46,8 +46,9 @@ export const sharedLines = (noding: Noding): readonly SharedLines[] => {
  * @param parts which parts count.
  */
 export const outlineOf = (noding: Noding, parts: (part: number) => boolean): readonly Region[] => {
+  const untouched = noding.rings.map(({ edges }) => edges.every(({ from }) => !isShared(noding, from)));
   const open = edgeGroups(noding).flatMap((group) => {
-    const own = group.filter(({ part }) => parts(part));
+    const own = group.filter(({ part, ring }) => parts(part) && untouched[ring] !== true);
     const first = own[0];
     if (first === undefined) return [];
     const forward = own.filter(({ edge }) => edge.from === first.edge.from);
@@ -57,7 +58,11 @@ export const outlineOf = (noding: Noding, parts: (part: number) => boolean): rea
       forward.length > backward ? first.edge : (own.find((e) => !forward.includes(e))?.edge ?? first.edge),
     ];
   });
-  return regionsOfRings(traceRings(noding.nodes, open).map((edges) => ringOfEdges(noding, edges)));
+  const whole = noding.rings.filter(
+    ({ part, edges }, ring) => parts(part) && untouched[ring] && edges.length > 1,
+  );
+  const rings = [...whole.map(({ edges }) => edges), ...traceRings(noding.nodes, open)];
+  return regionsOfRings(rings.map((edges) => ringOfEdges(noding, edges)));
 };
 
 /** Pieces (regions of parts) grouped by what hangs together along edges. */

@@ -41,6 +41,10 @@ export const growBox = (box: Box, by: number): Box => ({
 export const boxesMeet = (a: Box, b: Box): boolean =>
   a.xMin <= b.xMax && b.xMin <= a.xMax && a.yMin <= b.yMax && b.yMin <= a.yMax;
 
+/** Whether a point lies in a box, its sides included. */
+export const boxHolds = (box: Box, p: Point): boolean =>
+  p.x >= box.xMin && p.x <= box.xMax && p.y >= box.yMin && p.y <= box.yMax;
+
 const TURN = 2 * Math.PI;
 
 /**

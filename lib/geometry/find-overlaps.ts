@@ -4,10 +4,12 @@ import { boxesMeet, distanceToEdge, edgeBox, pointOnEdge, shareOf } from "@/lib/
 import type { EdgeGrid } from "@/lib/geometry/edge-grid";
 import { edgeGrid, edgesCrossedFrom, edgesNear } from "@/lib/geometry/edge-grid";
 import { curvesMeet } from "@/lib/geometry/meet";
+import type { Neighbours } from "@/lib/geometry/neighbours";
 import type { Noding } from "@/lib/geometry/noding";
 import { curveOf } from "@/lib/geometry/noding";
 import type { Point } from "@/lib/geometry/region";
-import { edgeGroups, ownedEdges, type OwnedEdge } from "@/lib/geometry/shared-edges";
+import type { OwnedEdge } from "@/lib/geometry/shared-edges";
+import { edgeGroups, isShared, ownedEdges } from "@/lib/geometry/shared-edges";
 import { TOUCH_MM } from "@/lib/geometry/tolerance";
 import type { Result } from "@/lib/result";
 import { err, ok } from "@/lib/result";
@@ -153,12 +155,13 @@ const unpack = (keys: ReadonlySet<number>, parts: number): readonly Pair[] =>
 
 /**
  * Which noded parts overlap, and how.
- * @param parts number of parts.
+ * @param neighbours of every part, as for the noding.
  * @returns `arrangement.tooDense` where the edges of different parts crowd so much that comparing them would take too
  * long. O(n log n) in the edges where few edges crowd in one place, and the number of crossings besides.
  */
-export const findOverlaps = (noding: Noding, parts: number): Result<Overlaps> => {
-  const owned = ownedEdges(noding);
+export const findOverlaps = (noding: Noding, neighbours: Neighbours): Result<Overlaps> => {
+  const parts = neighbours.length;
+  const owned = ownedEdges(noding).filter(({ part }) => (neighbours[part]?.length ?? 0) > 0);
   const grid = edgeGrid(
     owned.map(({ edge }) => curveOf(noding.nodes, edge)),
     TOUCH_MM,
@@ -179,13 +182,12 @@ export const findOverlaps = (noding: Noding, parts: number): Result<Overlaps> =>
       detail:
         "Too many edges of different parts crowd in one place. Simplify the outlines or split the drawing.",
     });
-  const shared = (node: number) => (noding.partsAt[node]?.length ?? 0) > 1;
   let ring = -1;
-  for (const { index, part, edge, ring: own } of owned) {
+  for (const [at, { index, part, edge, ring: own }] of owned.entries()) {
     if (!alone.has(index)) continue;
-    if (own === ring && !shared(edge.from) && !shared(edge.to)) continue;
+    if (own === ring && !isShared(noding, edge.from) && !isShared(noding, edge.to)) continue;
     ring = own;
-    const curve = grid.edges[index];
+    const curve = grid.edges[at];
     if (curve === undefined) continue;
     for (const other of holders(grid, owned, pointOnEdge(curve, 0.5))) {
       if (other === part) continue;

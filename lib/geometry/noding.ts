@@ -1,6 +1,16 @@
 import type { Edge } from "@/lib/geometry/edge";
-import { bulgeBetween, distanceToEdge, edgeOf, shareOf } from "@/lib/geometry/edge";
+import {
+  boxHolds,
+  boxesMeet,
+  bulgeBetween,
+  distanceToEdge,
+  edgeBox,
+  edgeOf,
+  shareOf,
+} from "@/lib/geometry/edge";
 import { edgeGrid, edgesNear } from "@/lib/geometry/edge-grid";
+import type { Neighbours } from "@/lib/geometry/neighbours";
+import { neighbourBoxes } from "@/lib/geometry/neighbours";
 import type { Point, Region, Ring } from "@/lib/geometry/region";
 import { vertexOf } from "@/lib/geometry/ring";
 import { TOUCH_MM } from "@/lib/geometry/tolerance";
@@ -31,7 +41,8 @@ const MAX_PASSES = 4;
 /** Edges bent by less than this need no second look. */
 const BENT_MM = TOUCH_MM / 100;
 
-type Corner = Readonly<{ point: Point; part: number }>;
+/** A vertex of a part; `near` where it lies in the box of another part, so that it may touch that part. */
+type Corner = Readonly<{ point: Point; part: number; near: boolean }>;
 
 /** For each corner the index of the first of its cluster: corners of different parts nearer than the tolerance. */
 const clusters = (corners: readonly Corner[]): readonly number[] => {
@@ -47,7 +58,8 @@ const clusters = (corners: readonly Corner[]): readonly number[] => {
   const size = 2 * TOUCH_MM;
   const cells = new Map<number, number[]>();
   const keyOf = (column: number, row: number) => column * 1_000_003 + row;
-  corners.forEach(({ point, part }, i) => {
+  corners.forEach(({ point, part, near }, i) => {
+    if (!near) return;
     const [column, row] = [Math.floor(point.x / size), Math.floor(point.y / size)];
     for (let dx = -1; dx <= 1; dx++)
       for (let dy = -1; dy <= 1; dy++)
@@ -86,8 +98,11 @@ const drawnRings = (parts: readonly (readonly Region[])[]): readonly DrawnRing[]
     ]),
   );
 
-const mergeCorners = (drawn: readonly DrawnRing[]): Noding => {
-  const corners = drawn.flatMap(({ ring, part }) => ring.map((point) => ({ point, part })));
+const mergeCorners = (drawn: readonly DrawnRing[], neighbours: Neighbours): Noding => {
+  const corners = drawn.flatMap(({ ring, part }) => {
+    const boxes = neighbours[part] ?? [];
+    return ring.map((point) => ({ point, part, near: boxes.some((box) => boxHolds(box, point)) }));
+  });
   const cluster = clusters(corners);
   const members = new Map<number, number[]>();
   cluster.forEach((root, i) => {
@@ -133,19 +148,30 @@ const splitEdge = (edge: NodedEdge, curve: Edge, cuts: readonly Cut[]): readonly
 type Pass = Readonly<{ noding: Noding; bent: boolean }>;
 
 /** Splits every edge at the nodes of other parts that lie on it. */
-const splitEdges = (noding: Noding): Pass => {
+const splitEdges = (noding: Noding, neighbours: Neighbours): Pass => {
   const { nodes, partsAt, rings } = noding;
-  const flat = rings.flatMap(({ part, edges }) => edges.map((edge) => ({ part, edge })));
-  const curves = flat.map(({ edge }) => curveOf(nodes, edge));
-  const grid = edgeGrid(curves, TOUCH_MM);
+  const reachable = rings.flatMap(({ part, edges }) => {
+    const boxes = neighbours[part] ?? [];
+    if (boxes.length === 0) return [];
+    return edges.flatMap((edge) => {
+      const curve = curveOf(nodes, edge);
+      const box = edgeBox(curve);
+      return boxes.some((other) => boxesMeet(box, other)) ? [{ part, edge, curve }] : [];
+    });
+  });
+  if (reachable.length === 0) return { noding, bent: false };
+  const grid = edgeGrid(
+    reachable.map(({ curve }) => curve),
+    TOUCH_MM,
+  );
   const cuts = new Map<number, Cut[]>();
   const alsoAt = partsAt.map((parts) => [...parts]);
   let bent = false;
   nodes.forEach((point, node) => {
     for (const index of edgesNear(grid, point)) {
-      const { part, edge } = flat[index] ?? { part: -1, edge: { from: node, to: node } };
-      const curve = curves[index];
-      if (curve === undefined || edge.from === node || edge.to === node) continue;
+      const found = reachable[index];
+      if (found === undefined || found.edge.from === node || found.edge.to === node) continue;
+      const { part, curve } = found;
       if (partsAt[node]?.includes(part) === true) continue;
       const off = distanceToEdge(curve, point);
       if (off > TOUCH_MM) continue;
@@ -159,22 +185,16 @@ const splitEdges = (noding: Noding): Pass => {
     }
   });
   if (cuts.size === 0) return { noding, bent: false };
-  let next = 0;
-  const split = rings.map((ring) => {
-    const start = next;
-    next += ring.edges.length;
-    const edges = ring.edges.flatMap((edge, i) => {
-      const here = cuts.get(start + i);
-      const curve = curves[start + i];
-      if (here === undefined || curve === undefined) return [edge];
-      return splitEdge(
-        edge,
-        curve,
-        here.sort((a, b) => a.share - b.share),
-      );
-    });
-    return { ...ring, edges };
-  });
+  const pieces = new Map<NodedEdge, readonly NodedEdge[]>();
+  for (const [index, here] of cuts) {
+    const found = reachable[index];
+    const inOrder = here.sort((a, b) => a.share - b.share);
+    if (found !== undefined) pieces.set(found.edge, splitEdge(found.edge, found.curve, inOrder));
+  }
+  const split = rings.map((ring) => ({
+    ...ring,
+    edges: ring.edges.flatMap((edge) => pieces.get(edge) ?? [edge]),
+  }));
   return { noding: { nodes, partsAt: alsoAt, rings: split }, bent };
 };
 
@@ -186,9 +206,10 @@ const splitEdges = (noding: Noding): Pass => {
  * @returns nodes and rings; a ring whose vertices all merge has fewer than two edges.
  */
 export const nodeParts = (parts: readonly (readonly Region[])[]): Noding => {
-  let noding = mergeCorners(drawnRings(parts));
+  const neighbours = neighbourBoxes(parts);
+  let noding = mergeCorners(drawnRings(parts), neighbours);
   for (let pass = 0; pass < MAX_PASSES; pass++) {
-    const next = splitEdges(noding);
+    const next = splitEdges(noding, neighbours);
     noding = next.noding;
     if (!next.bent) break;
   }

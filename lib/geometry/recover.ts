@@ -1,7 +1,7 @@
 import type { Polygons } from "@/lib/geometry/clip";
 import { chordPoints } from "@/lib/geometry/chords";
 import type { Edge } from "@/lib/geometry/edge";
-import { bulgeBetween, directionAt, distanceToEdge, edgeOf, shareOf } from "@/lib/geometry/edge";
+import { bulgeBetween, directionAt, distanceToEdge, edgeOf, ringEdges, shareOf } from "@/lib/geometry/edge";
 import type { EdgeGrid } from "@/lib/geometry/edge-grid";
 import { edgeGrid, edgesNear } from "@/lib/geometry/edge-grid";
 import { curvesMeet } from "@/lib/geometry/meet";
@@ -35,12 +35,26 @@ const NO_SOURCE = -1;
 /** A stretch of a clipped ring that follows one curve; `from` is its first corner as clipped. */
 type Run = Readonly<{ source: number; from: Point }>;
 
-const nearestSource = (sources: Sources, p: Point, step: number): number => {
+/** Distance of a point from the straight line that a chord lies on, without end. */
+const offLine = ({ from, to }: Edge, p: Point): number => {
+  const [dx, dy] = [to.x - from.x, to.y - from.y];
+  const length = Math.hypot(dx, dy);
+  return length === 0 ? Infinity : Math.abs(dx * (p.y - from.y) - dy * (p.x - from.x)) / length;
+};
+
+/** The curve that a clipped edge lies along: its chord passes the middle and runs the same way. */
+const nearestSource = (sources: Sources, from: Point, to: Point, step: number): number => {
+  const at = (share: number) => ({
+    x: from.x + share * (to.x - from.x),
+    y: from.y + share * (to.y - from.y),
+  });
+  const middle = at(0.5);
   let best = NO_SOURCE;
   let least = 3 * step;
-  for (const index of edgesNear(sources.grid, p)) {
+  for (const index of edgesNear(sources.grid, middle)) {
     const chord = sources.grid.edges[index];
-    const off = chord === undefined ? Infinity : distanceToEdge(chord, p);
+    if (chord === undefined || distanceToEdge(chord, middle) > least) continue;
+    const off = Math.max(offLine(chord, at(0.25)), offLine(chord, middle), offLine(chord, at(0.75)));
     if (off < least) [least, best] = [off, sources.sourceOf[index] ?? NO_SOURCE];
   }
   return best;
@@ -49,7 +63,7 @@ const nearestSource = (sources: Sources, p: Point, step: number): number => {
 const runsOf = (corners: readonly Point[], sources: Sources, step: number): readonly Run[] => {
   const single = corners.map((from, i) => {
     const to = corners[(i + 1) % corners.length] ?? from;
-    return { source: nearestSource(sources, { x: (from.x + to.x) / 2, y: (from.y + to.y) / 2 }, step), from };
+    return { source: nearestSource(sources, from, to, step), from };
   });
   const starts = single.filter(
     ({ source }, i) =>
@@ -120,6 +134,18 @@ const lengthOf = (ring: Ring): number =>
 const isSliver = (ring: Ring): boolean =>
   ring.length < 2 || Math.abs(ringArea(ring)) <= (TOUCH_MM * lengthOf(ring)) / 2;
 
+/** Area between chords and their arc, as a share of radius squared: the end chords of a run are cut anywhere. */
+const CHORD_AREA_REL = 1e-6;
+
+/** The ring with its true curves; with its chords, where the curves found do not enclose the area that was clipped. */
+const ringOf = (closed: readonly (readonly [number, number])[], sources: Sources, step: number): Ring => {
+  const clipped = closed.slice(0, -1).map(([x, y]) => ({ x, y }));
+  const ring = recoverRing(closed, sources, step);
+  const radii = ringEdges(ring).reduce((sum, { arc }) => sum + (arc === null ? 0 : arc.radius ** 2), 0);
+  const allowed = TOUCH_MM * lengthOf(clipped) + CHORD_AREA_REL * radii;
+  return Math.abs(ringArea(ring) - ringArea(clipped)) <= allowed ? ring : clipped;
+};
+
 /**
  * Clipped polygons as regions of true lines and arcs: corners go back to the vertices they came from or to the true
  * crossings of their curves, and runs of chords become their arcs. Where no curve is found, the clipped corner stays.
@@ -128,13 +154,13 @@ const isSliver = (ring: Ring): boolean =>
  */
 export const recoverRegions = (polygons: Polygons, sources: Sources, step: number): readonly Region[] =>
   polygons.flatMap(([outer = [], ...holes]) => {
-    const ring = recoverRing(outer, sources, step);
+    const ring = ringOf(outer, sources, step);
     if (isSliver(ring)) return [];
     return [
       {
         outer: orientRing(ring, "outer"),
         holes: holes
-          .map((hole) => recoverRing(hole, sources, step))
+          .map((hole) => ringOf(hole, sources, step))
           .filter((hole) => !isSliver(hole))
           .map((hole) => orientRing(hole, "hole")),
       },

@@ -19,16 +19,32 @@ const heightOf = ({ nodes }: Noding, { from, to, bulge }: NodedEdge): number => 
   return (Math.hypot(b.x - a.x, b.y - a.y) / 2) * bulge * (from < to ? 1 : -1);
 };
 
+/** Whether more than one part has a vertex at a node. */
+export const isShared = ({ partsAt }: Noding, node: number): boolean => (partsAt[node]?.length ?? 0) > 1;
+
+const known = new WeakMap<Noding, readonly (readonly OwnedEdge[])[]>();
+
 /**
  * Groups of edges that run along each other from node to node: each edge with the edges that coincide with it within
  * `TOUCH_MM`, itself first. Edges alone in their group are included.
  */
 export const edgeGroups = (noding: Noding): readonly (readonly OwnedEdge[])[] => {
+  const found = known.get(noding) ?? groupEdges(noding);
+  known.set(noding, found);
+  return found;
+};
+
+const groupEdges = (noding: Noding): readonly (readonly OwnedEdge[])[] => {
   const groups: OwnedEdge[][] = [];
   const byEnds = new Map<number, OwnedEdge[][]>();
   const count = noding.nodes.length;
   for (const owned of ownedEdges(noding)) {
     const { from, to } = owned.edge;
+    // Edges of different parts coincide only between nodes that both parts have.
+    if (!isShared(noding, from) || !isShared(noding, to)) {
+      groups.push([owned]);
+      continue;
+    }
     const key = Math.min(from, to) * count + Math.max(from, to);
     const here = byEnds.get(key) ?? [];
     if (here.length === 0) byEnds.set(key, here);

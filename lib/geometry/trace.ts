@@ -1,7 +1,6 @@
-import type { Box } from "@/lib/geometry/arc";
 import { ringBox } from "@/lib/geometry/arc";
 import { ringContains } from "@/lib/geometry/contains";
-import { directionAt, edgeOf, pointOnEdge } from "@/lib/geometry/edge";
+import { boxHolds, directionAt, edgeOf, pointOnEdge } from "@/lib/geometry/edge";
 import type { NodedEdge, Noding } from "@/lib/geometry/noding";
 import { curveOf } from "@/lib/geometry/noding";
 import type { Point, Region, Ring } from "@/lib/geometry/region";
@@ -74,9 +73,6 @@ export const traceRings = (
   }
   return rings;
 };
-
-const boxHolds = (box: Box, p: Point): boolean =>
-  p.x >= box.xMin && p.x <= box.xMax && p.y >= box.yMin && p.y <= box.yMax;
 
 const midpoint = (ring: Ring): Point => {
   const [a, b] = [ring[0], ring[1]];

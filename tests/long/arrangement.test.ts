@@ -3,6 +3,8 @@ import { test } from "vitest";
 import { addsUp, fillsItsOutline, holdsTogether } from "@/tests/helpers/arrangement-laws";
 import { assembly, touchingPlates } from "@/tests/helpers/assemblies";
 
+const MINUTES = 10 * 60_000;
+
 test.each(["tee", "lap", "corner"] as const)(
   "2,000 pairs of plates that touch as a %s are one body, uncracked",
   (kind) => {
@@ -10,15 +12,23 @@ test.each(["tee", "lap", "corner"] as const)(
   },
 );
 
-test("|A∪B| + |A∩B| = |A| + |B| for 2,000 pairs thrown together", () => {
-  fc.assert(
-    fc.property(assembly(2, 2), ([a, b]) => {
-      if (a !== undefined && b !== undefined) addsUp(a, b);
-    }),
-    { numRuns: 2_000, endOnFailure: true },
-  );
-});
+test(
+  "|A∪B| + |A∩B| = |A| + |B| for 2,000 pairs thrown together",
+  () => {
+    fc.assert(
+      fc.property(assembly(2, 2), ([a, b]) => {
+        if (a !== undefined && b !== undefined) addsUp(a, b);
+      }),
+      { numRuns: 2_000, endOnFailure: true },
+    );
+  },
+  MINUTES,
+);
 
-test("2,000 assemblies of up to six parts fill their outline without overlap, in any order", () => {
-  fc.assert(fc.property(assembly(2, 6), fillsItsOutline), { numRuns: 2_000, endOnFailure: true });
-});
+test(
+  "2,000 assemblies of up to six parts fill their outline without overlap, in any order",
+  () => {
+    fc.assert(fc.property(assembly(2, 6), fillsItsOutline), { numRuns: 2_000, endOnFailure: true });
+  },
+  MINUTES,
+);
