@@ -22,11 +22,12 @@ export const isArc = (vertex: Vertex): boolean => Math.abs(vertex.bulge ?? 0) > 
  * left of the chord's middle.
  */
 export const arcOf = (from: Vertex, to: Point): Arc | null => {
+  if (!isArc(from)) return null;
   const bulge = from.bulge ?? 0;
   const dx = to.x - from.x;
   const dy = to.y - from.y;
   const chord = Math.hypot(dx, dy);
-  if (!isArc(from) || chord === 0) return null;
+  if (chord === 0) return null;
   const offset = (1 - bulge * bulge) / (4 * bulge);
   const centre = { x: (from.x + to.x) / 2 - dy * offset, y: (from.y + to.y) / 2 + dx * offset };
   const radius = (chord * (1 + bulge * bulge)) / (4 * Math.abs(bulge));
@@ -72,7 +73,10 @@ export const shareAtAngle = (arc: Arc, angle: number): number | null => {
  */
 export const edgeLength = (from: Vertex, to: Point): number => {
   const arc = arcOf(from, to);
-  return arc === null ? Math.hypot(to.x - from.x, to.y - from.y) : arcLength(arc);
+  if (arc !== null) return arcLength(arc);
+  const dx = to.x - from.x;
+  const dy = to.y - from.y;
+  return Math.sqrt(dx * dx + dy * dy);
 };
 
 /**

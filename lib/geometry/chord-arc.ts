@@ -17,8 +17,9 @@ export type ChordArc = Readonly<{
 /** The edge as a chord arc; null where it is straight or has no length. */
 export const chordArcOf = (from: Vertex, to: Point): ChordArc | null => {
   const bulge = from.bulge ?? 0;
+  if (bulge === 0) return null;
   const half = Math.hypot(to.x - from.x, to.y - from.y) / 2;
-  if (bulge === 0 || half === 0) return null;
+  if (half === 0) return null;
   const sign = Math.sign(bulge);
   const along = { x: (to.x - from.x) / (2 * half), y: (to.y - from.y) / (2 * half) };
   return {

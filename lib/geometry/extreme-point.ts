@@ -14,14 +14,27 @@ export const extremePoint = (
   direction: Point,
   origin: Point,
 ): ExtremePoint | null => {
-  let best: ExtremePoint | null = null;
-  for (const { outer } of regions)
-    outer.forEach((from, i) => {
-      const to = outer[(i + 1) % outer.length];
-      if (to === undefined) return;
-      const point = furthestOnEdge(from, to, direction);
-      const distance = (point.x - origin.x) * direction.x + (point.y - origin.y) * direction.y;
-      if (best === null || distance > best.distance) best = { point, distance };
-    });
-  return best;
+  const { x: dx, y: dy } = direction;
+  let furthest = -Infinity;
+  let at: Point | null = null;
+  for (const { outer } of regions) {
+    let from = outer[outer.length - 1];
+    for (const to of outer) {
+      const s = (to.x - origin.x) * dx + (to.y - origin.y) * dy;
+      if (s > furthest) {
+        furthest = s;
+        at = to;
+      }
+      if (from?.bulge !== undefined && from.bulge > 0) {
+        const point = furthestOnEdge(from, to, direction);
+        const onArc = (point.x - origin.x) * dx + (point.y - origin.y) * dy;
+        if (onArc > furthest) {
+          furthest = onArc;
+          at = point;
+        }
+      }
+      from = to;
+    }
+  }
+  return at === null ? null : { point: { x: at.x, y: at.y }, distance: furthest };
 };

@@ -14,8 +14,6 @@ export type Below = Readonly<{ area: number; moment: number; width: number }>;
  */
 export type Strips = Readonly<{ sMin: number; sMax: number; below: (d: number) => Below }>;
 
-type Line = Readonly<{ s0: number; s1: number; rise: number; weight: number }>;
-
 /** An arc with the directions of its chord frame resolved across (s) and along (t) the line. */
 type Curve = Readonly<{
   arc: ChordArc;
@@ -30,14 +28,14 @@ type Curve = Readonly<{
 type Sum = { area: number; moment: number; width: number };
 
 // ∫ over s < d of f dA = ∮ F dt with F = −(d − s)₊ for the area and −(d − s)₊²/2 for the moment.
-const addLine = (sum: Sum, s0: number, s1: number, rise: number, d: number, weight: number): void => {
+const addLine = (sum: Sum, s0: number, s1: number, rise: number, d: number): void => {
   const u0 = d - s0;
   const u1 = d - s1;
   if (u0 <= 0 && u1 <= 0) return;
   const share = u0 < 0 ? u1 / (u1 - u0) : u1 < 0 ? u0 / (u0 - u1) : 1;
-  const dt = rise * share * weight;
-  const a = Math.max(u0, 0);
-  const b = Math.max(u1, 0);
+  const dt = rise * share;
+  const a = u0 > 0 ? u0 : 0;
+  const b = u1 > 0 ? u1 : 0;
   sum.area -= (dt * (a + b)) / 2;
   sum.moment -= (dt * (a * a + a * b + b * b)) / 6;
   sum.width -= dt;
@@ -48,10 +46,10 @@ const addStretch = (sum: Sum, curve: Curve, from: number, to: number, d: number)
   const { arc, middle, us, ut, vs, vt, weight } = curve;
   const [p, q] = [onChordArc(arc, from), onChordArc(arc, to)];
   const [s0, s1] = [middle + us * p.u + vs * p.v, middle + us * q.u + vs * q.v];
-  const rise = ut * (q.u - p.u) + vt * (q.v - p.v);
+  const rise = weight * (ut * (q.u - p.u) + vt * (q.v - p.v));
   // An end that the line cuts lies on it up to rounding: its height is clamped, and the width taken whole.
-  addLine(sum, Math.min(s0, d), Math.min(s1, d), rise, d, weight);
-  if (s0 >= d && s1 >= d) sum.width -= rise * weight;
+  addLine(sum, Math.min(s0, d), Math.min(s1, d), rise, d);
+  if (s0 >= d && s1 >= d) sum.width -= rise;
   const [psi0, psi1] = [2 * Math.atan(arc.bulge * from), 2 * Math.atan(arc.bulge * to)];
   const bulge = Math.tan((psi1 - psi0) / 4);
   const chord = Math.hypot(q.u - p.u, q.v - p.v);
@@ -102,7 +100,8 @@ const addCurve = (sum: Sum, curve: Curve, d: number): void => {
  * @source Green's theorem with F = −(d − s)₊: the line's own edge adds nothing, so nothing has to be clipped.
  */
 export const stripsAlong = (sets: readonly WeightedRegions[], normal: Point, origin: Point): Strips => {
-  const lines: Line[] = [];
+  // Straight edges as s0, s1, rise × weight: this list is run through at every step of a search.
+  const lines: number[] = [];
   const curves: Curve[] = [];
   let [sMin, sMax] = [Infinity, -Infinity];
   const across = (v: Point) => v.x * normal.x + v.y * normal.y;
@@ -113,11 +112,12 @@ export const stripsAlong = (sets: readonly WeightedRegions[], normal: Point, ori
     sMax = Math.max(sMax, s);
   };
   const addEdge = (from: Vertex, to: Vertex, weight: number) => {
-    const [s0, s1] = [sOf(from), sOf(to)];
+    const s0 = (from.x - origin.x) * normal.x + (from.y - origin.y) * normal.y;
+    const s1 = (to.x - origin.x) * normal.x + (to.y - origin.y) * normal.y;
     reach(s0);
     const arc = chordArcOf(from, to);
     if (arc === null) {
-      lines.push({ s0, s1, rise: along({ x: to.x - from.x, y: to.y - from.y }), weight });
+      lines.push(s0, s1, weight * ((to.y - from.y) * normal.x - (to.x - from.x) * normal.y));
       return;
     }
     const middle = sOf(arc.middle);
@@ -137,9 +137,11 @@ export const stripsAlong = (sets: readonly WeightedRegions[], normal: Point, ori
           const to = ring[(i + 1) % ring.length];
           if (to !== undefined) addEdge(from, to, weight);
         });
+  const edges = Float64Array.from(lines);
   const below = (d: number): Below => {
     const sum: Sum = { area: 0, moment: 0, width: 0 };
-    for (const line of lines) addLine(sum, line.s0, line.s1, line.rise, d, line.weight);
+    for (let i = 0; i < edges.length; i += 3)
+      addLine(sum, edges[i] ?? 0, edges[i + 1] ?? 0, edges[i + 2] ?? 0, d);
     for (const curve of curves) addCurve(sum, curve, d);
     return sum;
   };

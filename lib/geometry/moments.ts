@@ -119,46 +119,59 @@ const segmentMoments = (from: Point, to: Point, bulge: number, origin: Point): M
   );
 };
 
-/**
- * Moments of the area inside one ring, to third order, about `origin`.
- * @param ring lines and arcs, mm, not closed; anticlockwise counts positive, clockwise negative.
- * @param origin take it near the ring: digits are lost as (distance / size)^order.
- * @returns zeros for a ring without area. Exact up to rounding for lines and arcs.
- * @source Green's theorem: each chord adds the triangle with the origin (∫xᵖy^q over it = c·Σ i!j!/(p+q+2)! …, with
- * c = x₀y₁ − x₁y₀), each arc the circular segment beside its chord.
- */
-export const ringMoments = (ring: Ring, origin: Point): Moments => {
-  const n = ring.length;
-  const last = ring[n - 1];
-  if (last === undefined) return NO_MOMENTS;
-  let [a, mx, my, mxx, mxy, myy] = [0, 0, 0, 0, 0, 0];
-  let [mxxx, mxxy, mxyy, myyy] = [0, 0, 0, 0];
+/** One set of regions with the weight its material has (n = E / E_ref, or 1). */
+export type WeightedRegions = Readonly<{ regions: readonly Region[]; weight: number }>;
+
+/** One loop over all edges with plain variables: this decides the speed of everything that needs moments. */
+const weightedMoments = (sets: readonly WeightedRegions[], origin: Point): Moments => {
+  const ox = origin.x;
+  const oy = origin.y;
+  let a = 0;
+  let mx = 0;
+  let my = 0;
+  let mxx = 0;
+  let mxy = 0;
+  let myy = 0;
+  let mxxx = 0;
+  let mxxy = 0;
+  let mxyy = 0;
+  let myyy = 0;
   let arcs = NO_MOMENTS;
-  let from = last;
-  let x0 = last.x - origin.x;
-  let y0 = last.y - origin.y;
-  for (const to of ring) {
-    const x1 = to.x - origin.x;
-    const y1 = to.y - origin.y;
-    const c = x0 * y1 - x1 * y0;
-    const [sx, sy] = [x0 + x1, y0 + y1];
-    const [px, py] = [x0 * x0 + x1 * x1, y0 * y0 + y1 * y1];
-    a += c;
-    mx += c * sx;
-    my += c * sy;
-    mxx += c * (px + x0 * x1);
-    mxy += c * (sx * sy + x0 * y0 + x1 * y1);
-    myy += c * (py + y0 * y1);
-    mxxx += c * sx * px;
-    mxxy += c * (sy * sx * sx + 2 * (x0 * x0 * y0 + x1 * x1 * y1));
-    mxyy += c * (sx * sy * sy + 2 * (y0 * y0 * x0 + y1 * y1 * x1));
-    myyy += c * sy * py;
-    if (from.bulge !== undefined && from.bulge !== 0)
-      arcs = addMoments(arcs, segmentMoments(from, to, from.bulge, origin));
-    from = to;
-    x0 = x1;
-    y0 = y1;
-  }
+  for (const { regions, weight } of sets)
+    for (const { outer, holes } of regions)
+      for (let k = -1; k < holes.length; k += 1) {
+        const ring = k < 0 ? outer : (holes[k] ?? []);
+        let from = ring[ring.length - 1];
+        if (from === undefined) continue;
+        let x0 = from.x - ox;
+        let y0 = from.y - oy;
+        for (const to of ring) {
+          const x1 = to.x - ox;
+          const y1 = to.y - oy;
+          const c = weight * (x0 * y1 - x1 * y0);
+          const sx = x0 + x1;
+          const sy = y0 + y1;
+          const px = x0 * x0 + x1 * x1;
+          const py = y0 * y0 + y1 * y1;
+          const p0 = x0 * y0;
+          const p1 = x1 * y1;
+          a += c;
+          mx += c * sx;
+          my += c * sy;
+          mxx += c * (px + x0 * x1);
+          mxy += c * (sx * sy + p0 + p1);
+          myy += c * (py + y0 * y1);
+          mxxx += c * sx * px;
+          mxxy += c * (sy * sx * sx + 2 * (x0 * p0 + x1 * p1));
+          mxyy += c * (sx * sy * sy + 2 * (y0 * p0 + y1 * p1));
+          myyy += c * sy * py;
+          if (from.bulge !== undefined && from.bulge !== 0)
+            arcs = addMoments(arcs, segmentMoments(from, to, from.bulge, origin), weight);
+          from = to;
+          x0 = x1;
+          y0 = y1;
+        }
+      }
   return {
     area: a / 2 + arcs.area,
     x: mx / 6 + arcs.x,
@@ -173,25 +186,23 @@ export const ringMoments = (ring: Ring, origin: Point): Moments => {
   };
 };
 
-/** Moments of regions (outer rings less their holes) about `origin`; zeros for an empty list. */
+/**
+ * Moments of regions (outer rings less their holes) to third order, about `origin`.
+ * @param regions rings of lines and arcs, mm; anticlockwise counts positive, clockwise negative.
+ * @param origin take it near the regions: digits are lost as (distance / size)^order.
+ * @returns zeros for an empty list or rings without area. Exact up to rounding for lines and arcs.
+ * @source Green's theorem: each chord adds the triangle with the origin (∫xᵖy^q over it = c·Σ i!j!/(p+q+2)! …, with
+ * c = x₀y₁ − x₁y₀), each arc the circular segment beside its chord.
+ */
 export const regionMoments = (regions: readonly Region[], origin: Point): Moments =>
-  regions.reduce(
-    (sum, region) =>
-      [region.outer, ...region.holes].reduce(
-        (part, ring) => addMoments(part, ringMoments(ring, origin)),
-        sum,
-      ),
-    NO_MOMENTS,
-  );
+  weightedMoments([{ regions, weight: 1 }], origin);
+
+/** Moments of the area inside one ring about `origin`, negative where it runs clockwise; see `regionMoments`. */
+export const ringMoments = (ring: Ring, origin: Point): Moments =>
+  regionMoments([{ outer: ring, holes: [] }], origin);
 
 /** An area, its centroid in drawing coordinates, and its moments about that centroid (`x` and `y` are rounding only). */
 export type CentralMoments = Readonly<{ centroid: Point; moments: Moments }>;
-
-/** One set of regions with the weight its material has (n = E / E_ref, or 1). */
-export type WeightedRegions = Readonly<{ regions: readonly Region[]; weight: number }>;
-
-const weightedMoments = (sets: readonly WeightedRegions[], origin: Point): Moments =>
-  sets.reduce((sum, set) => addMoments(sum, regionMoments(set.regions, origin), set.weight), NO_MOMENTS);
 
 /**
  * Centroid and central moments of weighted regions.
