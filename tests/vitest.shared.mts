@@ -14,6 +14,7 @@ const common = {
   environment: "node",
   pool: "forks",
   passWithNoTests: false,
+  env: { LOG_LEVEL: "silent" },
 } as const;
 
 /** Suites that share nothing: as many at once as there are cores. */

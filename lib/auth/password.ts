@@ -48,9 +48,13 @@ const isCommon = (lower: string): boolean =>
   lower.replace(COMMON_WORDS, "").replace(/[\d\s\p{P}\p{S}]+/gu, "").length < MIN_OWN_LETTERS &&
   lower.search(COMMON_WORDS) >= 0;
 
+/** A run such as abcdef… or 7890123…: every step the same, digits counted round. */
 const isRun = (text: string): boolean => {
+  const round = /^\d+$/.test(text) ? 10 : 0x110000;
   const steps = new Set<number>();
-  for (let i = 1; i < text.length; i += 1) steps.add(text.charCodeAt(i) - text.charCodeAt(i - 1));
+  for (let i = 1; i < text.length; i += 1) {
+    steps.add((text.charCodeAt(i) - text.charCodeAt(i - 1) + round) % round);
+  }
   return steps.size <= 1;
 };
 

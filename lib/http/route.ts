@@ -14,7 +14,9 @@ import { requireVersion } from "./version";
 
 type Params = Readonly<Record<string, string>>;
 /** Next gives no params at all to a route without any. */
-type NextContext = Readonly<{ params: Promise<Record<string, string | string[] | undefined> | undefined> }>;
+type NextContext = Readonly<{
+  params: Promise<Record<string, string | string[] | undefined> | undefined> | undefined;
+}>;
 type Handler = (request: Request, context: NextContext) => Promise<Response>;
 
 type Args = Readonly<{

@@ -1,7 +1,7 @@
 import type { Fault, Result } from "@/lib/result";
 
 /** The value of a result that a test expects to succeed; fails with the fault otherwise. */
-export const must = <T>(result: Result<T>): T => {
+export const must = <T>(result: Result<T, unknown>): T => {
   if (!result.ok) throw new Error(`expected a value, got ${JSON.stringify(result.error)}`);
   return result.value;
 };
