@@ -109,6 +109,8 @@ export const deliveryRows = sqliteTable(
     primaryKey({ columns: [t.deliveryId, t.ordinal] }),
     // Inspection filtered by verdict and cause, in the file's order.
     index("delivery_rows_verdict").on(t.deliveryId, t.verdict, t.cause, t.ordinal),
+    // Counts by verdict, cause and decision without touching the wide rows.
+    index("delivery_rows_counts").on(t.deliveryId, t.verdict, t.cause, t.decision, t.against),
     check("delivery_row_verdict", sql`${t.verdict} in ('accepted', 'queried', 'refused')`),
   ],
 );

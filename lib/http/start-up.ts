@@ -9,6 +9,7 @@ import type { Drawing } from "@/lib/drawing/schema";
 import { environment } from "@/lib/env";
 import { logger } from "@/lib/logger";
 import { computePool } from "@/lib/services/compute/pool";
+import { startJobs } from "@/lib/services/delivery/run-jobs";
 
 const SWEEP_EVERY_MS = 3_600_000;
 
@@ -54,7 +55,7 @@ const openDatabase = async (): Promise<Db> => {
 
 /**
  * What the server does before its first request: reads the environment, opens, checks and migrates the database, warms
- * the compute threads and the password hash up, and sweeps what ran out, now and every hour. What fails ends the
+ * the compute threads and the password hash up, takes up deliveries that a crash left in the middle, and sweeps what ran out, now and every hour. What fails ends the
  * process with one line and exit code 1: a server that answers 500 to everybody helps nobody.
  */
 export const startUp = async (): Promise<void> => {
@@ -66,6 +67,7 @@ export const startUp = async (): Promise<void> => {
   const db = await openDatabase();
   await computePool().warmUp(PLATE);
   await verifyPassword(null, "warm-up");
+  await startJobs(db, { atStart: true });
   const sweepQuietly = () =>
     void sweep(db).catch((error: unknown) => logger().warn({ err: String(error) }, "sweeping failed"));
   sweepQuietly();

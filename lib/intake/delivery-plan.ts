@@ -38,7 +38,7 @@ const SAME_FIGURE_REL = 1e-9;
  * revision), or held by a shape that a table must not touch. One function for preview and putting away.
  */
 export function standingOf(
-  next: Readonly<{ contentHash: string; tabulated: TabulatedSet }>,
+  next: Readonly<{ contentHash: string; tabulated: TabulatedSet; bayId: string }>,
   held: Held | null,
 ): Standing {
   if (held === null) return { against: "new", detail: "", differences: [] };
@@ -46,6 +46,12 @@ export function standingOf(
     return {
       against: "held",
       detail: `Drawn in the firm and kept in ${held.bay} at revision ${held.revision}: a table does not replace it.`,
+      differences: [],
+    };
+  if (held.bayId !== next.bayId)
+    return {
+      against: "held",
+      detail: `Kept in ${held.bay} at revision ${held.revision}: bring it into that bay, or choose another designation.`,
       differences: [],
     };
   if (held.inWork)
@@ -88,7 +94,9 @@ export function choicesFor(
   if (inspection.verdict === "accepted") return ["leave-out"];
   const unreadable = inspection.properties === null || inspection.designation === "";
   const structural = inspection.reasons.some(
-    (r) => r.verdict === "refused" && (r.field === undefined || r.field === "designation"),
+    (r) =>
+      r.cause === "duplicate" ||
+      (r.verdict === "refused" && (r.field === undefined || r.field === "designation")),
   );
   if (unreadable || structural) return ["leave-out"];
   const refused = inspection.reasons.some((r) => r.verdict === "refused");

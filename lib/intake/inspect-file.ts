@@ -12,12 +12,21 @@ export type InspectedRow = Readonly<{ cells: readonly string[]; inspection: Insp
 /** Rows for which slips in dimensions are searched: the search costs hundreds of computations each. */
 const DEEP_ROWS = 200;
 
+/** The file's text under its reading, and the cells that people have mended, by row. */
+export type FileToInspect = Readonly<{
+  text: string;
+  lineOffset: number;
+  reading: Reading;
+  mended?: (row: number, cells: readonly string[]) => readonly string[];
+}>;
+
 /** Typed rows of a file under its reading, one after another; ends with a fault when the file must be given back. */
-export function* typedRows(
-  text: string,
-  lineOffset: number,
-  reading: Reading,
-): Generator<TypedRow, FileFault | null> {
+export function* typedRows({
+  text,
+  lineOffset,
+  reading,
+  mended = (_, cells) => cells,
+}: FileToInspect): Generator<TypedRow, FileFault | null> {
   const records = recordsOf(text, reading.delimiter);
   const lastHead = reading.unitLine ?? reading.headingLine;
   let number = 0;
@@ -34,7 +43,9 @@ export function* typedRows(
         line: record.line,
         column: 1,
       };
-    yield readRow(record, number, reading);
+    const cells = mended(number, record.cells);
+    // Who mended a cell has seen the whole row: what was wrong with its quotation marks is settled.
+    yield readRow(cells === record.cells ? record : { ...record, cells, fault: null }, number, reading);
   }
 }
 
@@ -42,12 +53,9 @@ export function* typedRows(
  * Every row of a file inspected, in order: computed, compared, duplicates inside the file named. The generator yields after
  * each row, so that the caller stores, reports progress and stops as it likes. Memory: one entry for each designation.
  */
-export function* inspectFile(
-  text: string,
-  lineOffset: number,
-  reading: Reading,
-): Generator<InspectedRow, FileFault | null> {
-  const rows = typedRows(text, lineOffset, reading);
+export function* inspectFile(file: FileToInspect): Generator<InspectedRow, FileFault | null> {
+  const { reading } = file;
+  const rows = typedRows(file);
   const seen = new Map<string, number>();
   const habits = new BlankHabits();
   let deep = DEEP_ROWS;

@@ -10,27 +10,25 @@ export type QueryRow = Readonly<{
   cells: readonly string[];
 }>;
 
-const HEAD = ["Row", "Line", "Verdict", "Cause", "Reason", "Decision"] as const;
+export const QUERIES_HEAD = ["Row", "Line", "Verdict", "Cause", "Reason", "Decision"] as const;
 
 /**
- * Queried and refused rows for the supplier, as CSV: why first, then the row as it was written. Cells that a spreadsheet would
- * take for a formula get a leading apostrophe, unless they are plain numbers.
+ * One line of the file of queries for the supplier: why first, then the row as it was written, or plain cells (the headings).
+ * Cells that a spreadsheet would take for a formula get a leading apostrophe, unless they are plain numbers.
  */
-export function queriesCsv(headings: readonly string[], rows: Iterable<QueryRow>): string {
-  const lines = [...rows].map((row) => [
-    String(row.number),
-    String(row.line),
-    row.verdict,
-    row.reasons.map((r) => CAUSES[r.cause]).join("; "),
-    row.reasons.map((r) => r.detail).join(" "),
-    row.decision,
-    ...row.cells,
-  ]);
-  return Papa.unparse(
-    [[...HEAD, ...headings], ...lines].map((line) => line.map(harmless)),
-    { newline: "\r\n" },
-  );
+export function queryLine(row: QueryRow | readonly string[]): string {
+  const cells = "cells" in row ? [...reasonsOf(row), ...row.cells] : row;
+  return `${Papa.unparse([cells.map(harmless)], { newline: "\r\n" })}\r\n`;
 }
+
+const reasonsOf = (row: QueryRow): readonly string[] => [
+  String(row.number),
+  String(row.line),
+  row.verdict,
+  row.reasons.map((r) => CAUSES[r.cause]).join("; "),
+  row.reasons.map((r) => r.detail).join(" "),
+  row.decision,
+];
 
 /** @source OWASP, "CSV Injection": = + - @ tab and CR at the start of a cell, in their wide forms too. */
 export const harmless = (cell: string): string =>

@@ -4,7 +4,8 @@ import { readUnit } from "@/lib/intake/file-units";
 import { MAX_COLUMNS, SAMPLE_RECORDS } from "@/lib/intake/limits";
 import { findMarks, readNumber, type Marks } from "@/lib/intake/read-number";
 import { kindOf, recogniseColumns, type ColumnFound } from "@/lib/intake/recognise-columns";
-import { findDelimiter, firstRecords, type Delimiter, type TableRecord } from "@/lib/intake/records";
+import type { Delimiter } from "@/lib/intake/delimiters";
+import { findDelimiter, firstRecords, type TableRecord } from "@/lib/intake/records";
 import { DEFAULT_TOLERANCE, type Reading } from "@/lib/intake/schema";
 import { err, ok, type Result } from "@/lib/result";
 

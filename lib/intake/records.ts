@@ -1,17 +1,8 @@
 import Papa from "papaparse";
+import { DELIMITER_NAME, DELIMITERS, type Delimiter } from "@/lib/intake/delimiters";
 import type { FileFault } from "@/lib/intake/file-fault";
 import { MAX_BROKEN_QUOTES, MAX_CELL_CHARACTERS, MAX_COLUMNS } from "@/lib/intake/limits";
 import { err, ok, type Result } from "@/lib/result";
-
-export const DELIMITERS = [";", ",", "\t", "|"] as const;
-export type Delimiter = (typeof DELIMITERS)[number];
-
-export const DELIMITER_NAME: Record<Delimiter, string> = {
-  ";": "semicolon",
-  ",": "comma",
-  "\t": "tab",
-  "|": "pipe",
-};
 
 export type RecordFault = Readonly<{
   code: "quotes" | "tooManyColumns" | "cellTooLong";

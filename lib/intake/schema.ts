@@ -5,7 +5,7 @@ import { ENCODINGS } from "@/lib/intake/decode-bytes";
 import { FIELD_KEYS } from "@/lib/intake/fields";
 import { FILE_UNIT_KEYS } from "@/lib/intake/file-units";
 import { MAX_CELL_CHARACTERS, MAX_COLUMNS } from "@/lib/intake/limits";
-import { DELIMITERS } from "@/lib/intake/records";
+import { DELIMITERS } from "@/lib/intake/delimiters";
 
 // Safe cast: Object.keys of a literal object gives exactly its keys.
 export const FAMILIES = Object.keys(FAMILY_DIMENSIONS) as readonly Family[];

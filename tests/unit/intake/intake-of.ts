@@ -25,7 +25,7 @@ export function takeIn(
   if (!recognised.ok) return { fault: recognised.error, recognition: null, rows: [] };
   const { text, lineOffset, reading } = recognised.value;
   const rows: InspectedRow[] = [];
-  const all = inspectFile(text, lineOffset, options.change?.(reading) ?? reading);
+  const all = inspectFile({ text, lineOffset, reading: options.change?.(reading) ?? reading });
   for (;;) {
     const next = all.next();
     if (next.done === true) return { fault: next.value, recognition: recognised.value, rows };

@@ -3,7 +3,8 @@ import fc from "fast-check";
 import Papa from "papaparse";
 import { describe, expect, test } from "vitest";
 import { decodeBytes } from "@/lib/intake/decode-bytes";
-import { DELIMITERS, findDelimiter, firstRecords, recordsOf, type TableRecord } from "@/lib/intake/records";
+import { DELIMITERS } from "@/lib/intake/delimiters";
+import { findDelimiter, firstRecords, recordsOf, type TableRecord } from "@/lib/intake/records";
 import { bytesOf } from "./intake-of";
 
 const SPECTRUM = "node_modules/csv-spectrum";

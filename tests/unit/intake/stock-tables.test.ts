@@ -119,7 +119,7 @@ describe("the table with twelve planted defects", () => {
 
 describe("the plan against the Rack", () => {
   const { inspection } = takeIn(stock("stock-eu")).rows[0] ?? never();
-  const next = { contentHash: "h1", tabulated: tabulatedFigures(inspection, null) };
+  const next = { bayId: "b", contentHash: "h1", tabulated: tabulatedFigures(inspection, null) };
   const held = {
     shapeId: "s",
     bayId: "b",

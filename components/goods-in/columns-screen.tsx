@@ -1,0 +1,105 @@
+"use client";
+import { useState } from "react";
+import { ColumnRow } from "@/components/goods-in/column-row";
+import { FirstPiece } from "@/components/goods-in/first-piece";
+import { ReadingFacts } from "@/components/goods-in/reading-facts";
+import { Button } from "@/components/ui/button";
+import { Notice } from "@/components/ui/notice";
+import { Table, Th } from "@/components/ui/table";
+import { sentenceOf } from "@/lib/client/api";
+import { sendReading, useDeliveryDeed } from "@/lib/client/deliveries";
+import type { Reading } from "@/lib/intake/schema";
+import type { Delivery, Recognised } from "@/lib/schemas/delivery";
+
+type ColumnsScreenProps = Readonly<{
+  delivery: Delivery;
+  recognised: Recognised;
+  onRefused: (sentence: string | null) => void;
+}>;
+
+/** What was recognised, column by column, with its evidence; a correction reads the file again at once. */
+export function ColumnsScreen({ delivery, recognised, onRefused }: ColumnsScreenProps) {
+  const again = useDeliveryDeed(delivery.id, sendReading(delivery.id));
+  const [draft, setDraft] = useState<Reading>(recognised.reading);
+  const fixed = delivery.state !== "read" && delivery.state !== "failed" && delivery.state !== "stopped";
+  const read = (reading: Reading) => {
+    setDraft(reading);
+    onRefused(null);
+    again.mutate(
+      { input: { reading }, version: delivery.version },
+      {
+        onError: (cause) => {
+          setDraft(recognised.reading);
+          onRefused(sentenceOf(cause));
+        },
+      },
+    );
+  };
+  const change = (index: number, next: Partial<Reading["columns"][number]>) =>
+    read({ ...draft, columns: draft.columns.map((c, i) => (i === index ? { ...c, ...next } : c)) });
+  return (
+    <div className="grid min-h-0 grid-cols-[minmax(0,1fr)_380px] max-lg:grid-cols-1">
+      <section aria-label="Columns" className="min-h-0 overflow-auto max-lg:overflow-visible">
+        {recognised.questions.length > 0 && (
+          <Notice kind="conflict" head="Only you can say:" className="border-b border-rule p-3">
+            {recognised.questions.join(" ")}
+          </Notice>
+        )}
+        <Table aria-label="Columns of the file" className="[&_td]:px-1.5 [&_th]:h-9 [&_th]:bg-panel">
+          <thead className="sticky top-0 z-10">
+            <tr>
+              <Th numeric>Col</Th>
+              <Th>Heading in file</Th>
+              <Th className="max-sm:hidden">Rows 1, 2 as written</Th>
+              <Th>Goes to</Th>
+              <Th>Unit in file</Th>
+              <Th numeric className="max-xl:hidden">
+                Factor
+              </Th>
+              <Th numeric unit="% off computed" className="max-sm:hidden">
+                Worst of 50
+              </Th>
+              <Th className="max-md:hidden">Remark</Th>
+            </tr>
+          </thead>
+          <tbody>
+            {recognised.columns.map((column, i) => (
+              <ColumnRow
+                key={i}
+                index={i}
+                column={{ ...column, ...draft.columns[i] }}
+                disabled={fixed || again.isPending}
+                onChange={(next) => change(i, next)}
+              />
+            ))}
+          </tbody>
+        </Table>
+      </section>
+      <aside
+        aria-label="How the file is read"
+        className="min-h-0 overflow-y-auto border-l border-frame max-lg:overflow-visible max-lg:border-t max-lg:border-l-0"
+      >
+        <FirstPiece deliveryId={delivery.id} version={delivery.version} />
+        <ReadingFacts
+          recognised={recognised}
+          reading={draft}
+          disabled={fixed || again.isPending}
+          onRead={read}
+        />
+        {recognised.corrected && (
+          <p className="px-3 pb-3 text-note text-ink-3">
+            Corrected by hand.{" "}
+            <Button
+              size="small"
+              kind="plain"
+              disabled={fixed || again.isPending}
+              onClick={() => read(recognised.reading)}
+            >
+              Read again
+            </Button>
+          </p>
+        )}
+      </aside>
+    </div>
+  );
+}

@@ -1,0 +1,1 @@
+CREATE INDEX `delivery_rows_counts` ON `delivery_rows` (`delivery_id`,`verdict`,`cause`,`decision`,`against`);
