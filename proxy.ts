@@ -1,5 +1,5 @@
 import { NextResponse, type NextRequest } from "next/server";
-import { contentSecurityPolicy, NONCE_HEADER, WANTED_HEADER } from "@/app/content-security";
+import { contentSecurityPolicy, NONCE_HEADER } from "@/app/content-security";
 
 /** Sets a fresh nonce and the headers that depend on the request. It stops nobody: every page asks for the actor itself. */
 export function proxy(request: NextRequest): NextResponse {
@@ -7,7 +7,6 @@ export function proxy(request: NextRequest): NextResponse {
   const policy = contentSecurityPolicy(nonce, process.env.NODE_ENV === "development");
   const forwarded = new Headers(request.headers);
   forwarded.set(NONCE_HEADER, nonce);
-  forwarded.set(WANTED_HEADER, request.nextUrl.pathname + request.nextUrl.search);
   forwarded.set("content-security-policy", policy);
   const response = NextResponse.next({ request: { headers: forwarded } });
   response.headers.set("content-security-policy", policy);

@@ -1,7 +1,5 @@
 /** Request header by which the proxy hands the nonce to the root layout. */
 export const NONCE_HEADER = "x-nonce";
-/** Request header by which a page learns its own address, to come back to it after signing in. */
-export const WANTED_HEADER = "x-wanted";
 
 /**
  * Content security policy of a page. Scripts and style elements need the nonce; style attributes are allowed, because Radix

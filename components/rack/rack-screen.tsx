@@ -36,7 +36,7 @@ import type { FinderPage } from "@/lib/schemas/find-shapes";
 type RackScreenProps = Readonly<{
   /** The first page of the search in the address, and the bays, as the server found them. */
   first: FinderPage;
-  firstQuery: string;
+  firstQuery: Readonly<Record<string, string>>;
   bays: BayList;
   mayDraft: boolean;
   mayDeliver: boolean;
@@ -50,7 +50,7 @@ export function RackScreen({ first, firstQuery, bays, mayDraft, mayDeliver }: Ra
   const [state, setState] = useQueryStates(rackParsers, { history: "replace" });
   const search = useMemo(() => searchOf(state), [state]);
   const query = useMemo(() => queryOf(search), [search]);
-  const found = useShapeSearch(query, keyOf(query) === firstQuery ? first : null);
+  const found = useShapeSearch(query, keyOf(query) === keyOf(firstQuery) ? first : null);
   const allBays = useBays(bays).data?.items ?? bays.items;
   const rows = useMemo(() => found.data?.pages.flatMap((page) => page.items) ?? [], [found.data]);
   const counts = found.data?.pages[0]?.counts ?? null;

@@ -2,13 +2,29 @@
 import Link from "next/link";
 import { usePathname, useRouter } from "next/navigation";
 import { useEffect } from "react";
-import { AREAS, type AreaId, type Waiting } from "@/components/sheet/areas";
+import { AREAS, type AreaId } from "@/components/sheet/areas";
 import { cx } from "@/components/ui/cx";
+import { useWaiting } from "@/lib/client/waiting";
+import type { Waiting } from "@/lib/schemas/work";
 
-type AreaTabsProps = Readonly<{ waiting: Partial<Record<AreaId, Waiting>>; className?: string }>;
+/** The words of what waits in an area. */
+const waitingIn = (
+  waiting: Waiting | undefined,
+): Partial<Record<AreaId, Readonly<{ count: number; words?: string; title: string }>>> =>
+  waiting
+    ? {
+        rack: {
+          count: waiting.toCheck,
+          words: "to check",
+          title: "submitted revisions that wait for a check",
+        },
+        "goods-in": { count: waiting.deliveries, title: "deliveries that are not put away yet" },
+      }
+    : {};
 
 /** Index tabs of the book; the current one is cut from the same paper as the sheet. Alt+1… open the areas. */
-export function AreaTabs({ waiting, className }: AreaTabsProps) {
+export function AreaTabs({ className }: Readonly<{ className?: string }>) {
+  const waiting = waitingIn(useWaiting().data);
   const path = usePathname();
   const router = useRouter();
   useEffect(() => {

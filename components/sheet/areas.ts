@@ -7,6 +7,3 @@ export const AREAS = [
 ] as const;
 
 export type AreaId = (typeof AREAS)[number]["id"];
-
-/** What waits for this person in an area: the number, and the words beside it on a wide screen. */
-export type Waiting = Readonly<{ count: number; words?: string; title?: string }>;

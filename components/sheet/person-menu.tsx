@@ -11,7 +11,7 @@ type PersonMenuProps = Readonly<{ name: string; role: string }>;
 /** Who is here; units, notation, theme, keys; sign out. */
 export function PersonMenu({ name, role }: PersonMenuProps) {
   const { theme, setTheme } = useTheme();
-  const { settings, singleKeys, change, changeSingleKeys } = useDisplay();
+  const { settings, singleKeys, change, notKept, changeSingleKeys } = useDisplay();
   const signOut = useSignOut();
   const [refused, setRefused] = useState<string | null>(null);
   return (
@@ -80,9 +80,9 @@ export function PersonMenu({ name, role }: PersonMenuProps) {
       >
         Sign out
       </MenuItem>
-      {refused && (
+      {(refused ?? notKept) && (
         <p role="alert" className="max-w-60 px-3 py-1 text-note text-oxide-ink">
-          {refused}
+          {refused ?? `Not kept for the next visit: ${notKept}`}
         </p>
       )}
     </Menu>

@@ -1,6 +1,5 @@
 import Link from "next/link";
 import { AreaTabs } from "@/components/sheet/area-tabs";
-import type { AreaId, Waiting } from "@/components/sheet/areas";
 import { BrandMark } from "@/components/sheet/brand";
 import { FindField } from "@/components/sheet/find-field";
 import { PersonMenu } from "@/components/sheet/person-menu";
@@ -8,11 +7,10 @@ import { PersonMenu } from "@/components/sheet/person-menu";
 type StripProps = Readonly<{
   firm: string;
   person: Readonly<{ name: string; role: string }>;
-  waiting?: Partial<Record<AreaId, Waiting>>;
 }>;
 
 /** The strip over the sheet. It is a row of the desk's grid; on a phone the tabs lie at the foot. */
-export const Strip = ({ firm, person, waiting = {} }: StripProps) => (
+export const Strip = ({ firm, person }: StripProps) => (
   <header className="no-print contents">
     <Link
       href="/"
@@ -21,7 +19,7 @@ export const Strip = ({ firm, person, waiting = {} }: StripProps) => (
       <BrandMark className="size-[22px]" />
       <span className="max-lg:sr-only max-sm:not-sr-only">Flitchbook</span>
     </Link>
-    <AreaTabs waiting={waiting} className="[grid-area:tabs]" />
+    <AreaTabs className="[grid-area:tabs]" />
     <div className="flex min-w-0 items-center justify-end pr-3 [grid-area:who]">
       <FindField />
       <span className="mr-3 truncate text-table text-ink-2 max-lg:hidden">{firm}</span>

@@ -20,10 +20,10 @@ type StepInput = Readonly<{ step: LifeStep; body?: Readonly<Record<string, unkno
 export function useLifeStep(shapeId: string, revision: Readonly<{ ordinal: number; version: number }>) {
   const cache = useQueryClient();
   return useMutation({
-    mutationFn: async ({ step, body = {} }: StepInput) =>
+    mutationFn: async ({ step, body }: StepInput) =>
       (
         await api.post<RevisionRecord>(`/shapes/${shapeId}/revisions/${revision.ordinal}/${step}`, {
-          body,
+          ...(body && { body }),
           ifMatch: `"${revision.version}"`,
         })
       ).data,

@@ -13,7 +13,7 @@ type SignInProps = Readonly<{
 }>;
 
 export default async function SignInPage({ searchParams }: SignInProps) {
-  const { then } = await searchParams;
+  const { next } = await searchParams;
   const demo = isDemo() ? DEMO : null;
   return (
     <div className="grid min-h-full p-2 max-md:p-0">
@@ -23,7 +23,7 @@ export default async function SignInPage({ searchParams }: SignInProps) {
           <div className="relative grid grid-rows-[1fr_auto] content-between overflow-hidden max-md:grid-rows-1">
             <FlitchDrawing className="mx-auto w-full max-w-[1380px] self-start max-md:hidden" />
             <div className="flex flex-row-reverse items-end justify-between gap-8 max-lg:flex-col max-lg:items-stretch max-lg:gap-4">
-              <SignInForm firm={demo?.firm ?? null} people={demo?.people ?? []} wanted={wantedPath(then)} />
+              <SignInForm firm={demo?.firm ?? null} people={demo?.people ?? []} wanted={wantedPath(next)} />
               <section className="max-w-[620px] px-6 pt-4 pb-5 text-ink-2">
                 <h2 className="font-bold text-ink">Notes</h2>
                 <ol className="list-decimal pl-5 leading-[22px]">
