@@ -50,6 +50,7 @@ export function AreaTabs({ className }: Readonly<{ className?: string }>) {
         return (
           <Link
             key={area.id}
+            prefetch={false}
             href={area.href}
             aria-current={current ? "page" : undefined}
             className={cx(

@@ -14,6 +14,7 @@ export const Strip = ({ firm, person }: StripProps) => (
   <header className="no-print contents">
     <Link
       href="/"
+      prefetch={false}
       className="flex items-center gap-[9px] pr-[22px] pl-3.5 text-[17px] font-[680] tracking-[-.005em] no-underline [grid-area:brand] max-lg:pr-2.5"
     >
       <BrandMark className="size-[22px]" />
