@@ -46,7 +46,7 @@ export function BayRow({ bay, last, atWork, onChange, onDelete }: BayRowProps) {
 
   return (
     <tr>
-      <Td className="h-9 pl-3.5">
+      <Td className="h-9! pl-3.5!">
         <span className="inline-flex items-center gap-1">
           <b className="w-6 font-num">{bay.ordinal}</b>
           <Button
@@ -100,7 +100,7 @@ export function BayRow({ bay, last, atWork, onChange, onDelete }: BayRowProps) {
         />
       </Td>
       <Td numeric>{bay.shapes}</Td>
-      <Td className="pr-3 text-right">
+      <Td className="pr-3! text-right">
         <Button
           size="small"
           disabled={!changed || !percentFits || name.trim() === ""}

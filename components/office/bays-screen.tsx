@@ -94,7 +94,7 @@ export function BaysScreen({ pages, firm, bays: initial }: BaysScreenProps) {
             <caption className="sr-only">Bays in their order</caption>
             <thead>
               <tr>
-                <Th className="pl-3.5">Place</Th>
+                <Th className="pl-3.5!">Place</Th>
                 <Th>Name</Th>
                 <Th>Figures that count</Th>
                 <Th numeric unit="%">

@@ -53,6 +53,7 @@ export const DEED_CHOICES: readonly { value: string; label: string }[] = Object.
   .sort((a, b) => a.label.localeCompare(b.label, "en"));
 
 const HIDDEN = new Set([
+  "ordinal",
   "id",
   "version",
   "bayId",
@@ -74,9 +75,7 @@ const spaced = (key: string) => key.replace(/([A-Z])/g, (letter) => ` ${letter.t
 
 /** Before and after in words: the fields that differ, "role designer to engineer". */
 export const deedDetail = ({ before, after }: Pick<LogEntry, "before" | "after">): string => {
-  const keys = [...new Set([...Object.keys(before ?? {}), ...Object.keys(after ?? {})])].filter(
-    (key) => !HIDDEN.has(key),
-  );
+  const keys = Object.keys(after ?? before ?? {}).filter((key) => !HIDDEN.has(key));
   return keys
     .flatMap((key) => {
       const [was, is] = [shown(before?.[key]), shown(after?.[key])];

@@ -21,7 +21,7 @@ export const LogTable = ({ entries, show, headed }: LogTableProps) => (
     <caption className="sr-only">Deeds, newest first</caption>
     <thead className={headed ? "" : "sr-only"}>
       <tr>
-        <Th className="pl-3.5">When</Th>
+        <Th className="pl-3.5!">When</Th>
         <Th>Who</Th>
         <Th>On what</Th>
         <Th>Deed</Th>
@@ -31,7 +31,7 @@ export const LogTable = ({ entries, show, headed }: LogTableProps) => (
     <tbody>
       {entries.map((entry) => (
         <tr key={entry.id}>
-          <Td className="h-[26px] w-[84px] pl-3.5 font-num text-ink-2">
+          <Td className="h-[26px]! w-[84px] pl-3.5! font-num text-ink-2">
             <Moment at={entry.at} show={show} />
           </Td>
           <Td>{entry.actor.name}</Td>

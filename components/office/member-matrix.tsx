@@ -48,7 +48,7 @@ export function MemberMatrix({ members, bays, now, inHand, onTake, onRole, onWis
       <caption className="sr-only">Members, their roles and their rights in each bay</caption>
       <thead>
         <tr>
-          <Th rowSpan={2} className="sticky left-0 z-[1] bg-sheet pl-3.5">
+          <Th rowSpan={2} className="sticky left-0 z-[1] bg-sheet pl-3.5!">
             Member
           </Th>
           <Th rowSpan={2}>Role</Th>
@@ -70,7 +70,7 @@ export function MemberMatrix({ members, bays, now, inHand, onTake, onRole, onWis
           {bays.map((bay) => (
             <Th
               key={bay.id}
-              className="h-11 w-[68px] px-0.5 pt-[3px] pb-1 text-center align-top leading-[13px] whitespace-normal"
+              className="h-11! w-[68px] px-0.5! pt-[3px] pb-1! text-center! align-top! leading-[13px] whitespace-normal!"
             >
               <b className="block font-num leading-4 text-ink">{bay.ordinal}</b>
               <span className="text-micro">{bay.name}</span>
@@ -81,7 +81,7 @@ export function MemberMatrix({ members, bays, now, inHand, onTake, onRole, onWis
       <tbody ref={body} onKeyDown={onKeyDown}>
         {members.map((member, row) => (
           <Tr key={member.id} inHand={member.id === inHand}>
-            <Td className="sticky left-0 z-[1] h-[34px] bg-sheet pl-3.5">
+            <Td className="sticky left-0 z-[1] h-[34px]! bg-sheet pl-3.5!">
               <button
                 type="button"
                 aria-pressed={member.id === inHand}
@@ -106,7 +106,7 @@ export function MemberMatrix({ members, bays, now, inHand, onTake, onRole, onWis
               />
             </Td>
             {bays.map((bay, column) => (
-              <Td key={bay.id} className="border-l border-rule px-0 text-center last-of-type:border-r">
+              <Td key={bay.id} className="border-l border-rule px-0! text-center">
                 <RightCell
                   member={member}
                   bay={bay}

@@ -52,7 +52,7 @@ export function RightCell({ member, bay, now, tabIndex, onFocus, onWish }: Right
       label={`Right of ${member.name} in ${bay.name}`}
       open={open}
       onOpenChange={show}
-      className="w-[262px] p-0 py-1"
+      className="w-[262px] p-0!"
       trigger={
         <button
           type="button"
@@ -68,7 +68,7 @@ export function RightCell({ member, bay, now, tabIndex, onFocus, onWish }: Right
         </button>
       }
     >
-      <div onKeyDown={onKeyDown}>
+      <div onKeyDown={onKeyDown} className="py-1">
         {RIGHTS.map((right, index) => (
           <button
             key={right}
@@ -99,7 +99,7 @@ export function RightCell({ member, bay, now, tabIndex, onFocus, onWish }: Right
             the same in all bays
           </label>
           <label className="flex items-center gap-2.5">
-            until
+            until (empty: it stays)
             <input
               type="date"
               value={until}
@@ -108,7 +108,6 @@ export function RightCell({ member, bay, now, tabIndex, onFocus, onWish }: Right
               onKeyDown={(event) => event.stopPropagation()}
               className="border-b border-edge bg-field px-1.5 font-num"
             />
-            <span className="text-note text-ink-3">empty: it stays</span>
           </label>
         </div>
       </div>

@@ -18,11 +18,12 @@ const GIVES: readonly Readonly<{ what: string; roles: readonly Role[] }>[] = [
   { what: "Members, roles, rights, settings, the log", roles: ["admin"] },
 ];
 
-const CELL = "h-auto px-1.5 py-1.5 text-center whitespace-normal";
+const CELL = "h-auto! px-1.5! py-1.5 text-center whitespace-normal!";
+const WHAT = "h-auto! w-[176px] py-1.5 pl-3! leading-4 whitespace-normal! text-ink-2";
 
 const Given = ({ what, roles, current }: (typeof GIVES)[number] & { current: Role }) => (
   <tr>
-    <Td className="h-auto w-[176px] py-1.5 pl-3 leading-4 whitespace-normal text-ink-2">{what}</Td>
+    <Td className={WHAT}>{what}</Td>
     {ROLES.map((role) => (
       <Td key={role} className={cx(CELL, role === current && "bg-wash")}>
         {roles.includes(role) ? <AcceptedSign label="yes" /> : <span className="text-ink-3">no</span>}
@@ -42,7 +43,7 @@ export const RoleTable = ({ current }: { current: Role }) => (
         {ROLES.map((role) => (
           <Th
             key={role}
-            className={cx("px-1.5 text-center", role === current && "bg-wash font-[640] text-ink")}
+            className={cx("px-1.5! text-center!", role === current && "bg-wash font-[640] text-ink!")}
           >
             {role}
           </Th>
@@ -52,9 +53,7 @@ export const RoleTable = ({ current }: { current: Role }) => (
     <tbody>
       <Given {...GIVES[0]!} current={current} />
       <tr>
-        <Td className="h-auto w-[176px] py-1.5 pl-3 leading-4 whitespace-normal text-ink-2">
-          Right in bays unless granted otherwise
-        </Td>
+        <Td className={WHAT}>Right in bays unless granted otherwise</Td>
         {ROLES.map((role) => (
           <Td key={role} className={cx(CELL, role === current && "bg-wash")}>
             <RightSquare level={RIGHT_OF_ROLE[role]} />

@@ -13,6 +13,7 @@ const SOURCES = [
   "public",
   "fixtures/demo",
   "instrumentation.ts",
+  "instrumentation-client.ts",
   "proxy.ts",
   "next.config.ts",
   "postcss.config.mjs",

@@ -27,6 +27,7 @@ const TOP_LEVEL = new Set([
   "drizzle.config.ts",
   "proxy.ts",
   "instrumentation.ts",
+  "instrumentation-client.ts",
 ]);
 const MADE_BY_TOOLS = new Set([
   "node_modules",
