@@ -1,6 +1,7 @@
 import { extremePoint } from "@/lib/geometry/extreme-point";
 import { centralMoments, type CentralMoments, type WeightedRegions } from "@/lib/geometry/moments";
 import type { Point, Region } from "@/lib/geometry/region";
+import { everyNumberIsFinite } from "@/lib/section/finite";
 import { PRODUCT_ROUNDING_REL, principalAxes } from "@/lib/section/principal-axes";
 
 /** Elastic properties about the centroid: units and signs as in `SectionProperties`. */
@@ -47,7 +48,7 @@ const reach = (regions: readonly Region[], direction: Point, from: Point): reado
 /**
  * Area, centroid, second moments, principal axes, elastic section moduli and radii of gyration of weighted regions.
  * @param sets regions in drawing axes, mm; weight 1 for plain values, n = E/E_ref for transformed ones.
- * @returns null where the weighted area is not positive. SxTop = Ix / (yMax − ȳ) and so on; Sx, Sy, S1, S2 are the lesser
+ * @returns null where the weighted area is not positive or sizes are beyond what numbers hold. SxTop = Ix / (yMax − ȳ) and so on; Sx, Sy, S1, S2 are the lesser
  * of their two faces; S1 = I1 over the greatest distance from axis 1. Exact over lines and arcs.
  * @source Definitions; Green's theorem for the integrals (`lib/geometry/moments`).
  */
@@ -94,5 +95,8 @@ export const elasticOf = (sets: readonly WeightedRegions[]): Elastic | null => {
     r1: Math.sqrt(principal.I1 / area),
     r2: Math.sqrt(principal.I2 / area),
   };
-  return { values, anyAngle: principal.any, central };
+  // D = I1·I2 divides every stress of unsymmetrical bending.
+  return everyNumberIsFinite([values, moments, values.I1 * values.I2]) && values.I1 * values.I2 > 0
+    ? { values, anyAngle: principal.any, central }
+    : null;
 };

@@ -1,5 +1,6 @@
 import { centralMoments } from "@/lib/geometry/moments";
 import type { Point } from "@/lib/geometry/region";
+import { everyNumberIsFinite } from "@/lib/section/finite";
 import { plasticAxis } from "@/lib/section/plastic";
 import type { Section } from "@/lib/section/section";
 import { stiffParts, weightedBy } from "@/lib/section/stiffness";
@@ -41,7 +42,7 @@ export const plasticAbout = (section: Section, angle: number): PlasticAbout | nu
     x: centroid.x - offset * Math.sin(radians),
     y: centroid.y + offset * Math.cos(radians),
   });
-  return {
+  const about = {
     Z: area.modulus,
     at: at(area.offset),
     gap: area.gap,
@@ -49,4 +50,5 @@ export const plasticAbout = (section: Section, angle: number): PlasticAbout | nu
     atForce: at(force.offset),
     gapForce: force.gap,
   };
+  return everyNumberIsFinite(about) ? about : null;
 };

@@ -16,6 +16,9 @@ export type PlasticProperties = Readonly<{
   warnings: readonly SectionWarning[];
 }>;
 
+/** What every section with area has; the equal-force axis is for mixed strengths only. */
+const ALWAYS = ["Zx", "Zy", "Z1", "Z2", "pna", "Mp", "squash"] as const;
+
 const QUARTER_TURN = Math.PI / 2;
 
 const gapWarnings = (axes: readonly (readonly [string, PlasticAxis | null])[], what: string) =>
@@ -62,18 +65,23 @@ export const plasticProperties = (
       : x !== null && y !== null
         ? { x: yieldStress * x.modulus, y: yieldStress * y.modulus }
         : null;
+  const values: PlasticValues = {
+    Zx: x?.modulus ?? null,
+    Zy: y?.modulus ?? null,
+    Z1: one?.modulus ?? null,
+    Z2: two?.modulus ?? null,
+    pna: x !== null && y !== null ? place(x, y) : null,
+    equalForceAxis: fx !== null && fy !== null ? place(fx, fy) : null,
+    Mp,
+    squash: fx !== null ? fx.total : x !== null ? yieldStress * x.total : null,
+  };
   return {
-    values: {
-      Zx: x?.modulus ?? null,
-      Zy: y?.modulus ?? null,
-      Z1: one?.modulus ?? null,
-      Z2: two?.modulus ?? null,
-      pna: x !== null && y !== null ? place(x, y) : null,
-      equalForceAxis: fx !== null && fy !== null ? place(fx, fy) : null,
-      Mp,
-      squash: fx !== null ? fx.total : x !== null ? yieldStress * x.total : null,
-    },
-    absent: [],
+    values,
+    absent: ALWAYS.filter((key) => values[key] === null).map((property) => ({
+      property,
+      code: "plastic.noAxis",
+      detail: "No axis halves this area: look for outlines that cross themselves.",
+    })),
     warnings: [
       ...gapWarnings(
         [

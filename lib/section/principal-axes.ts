@@ -10,6 +10,9 @@ export const ROUND_REL = 1e-9;
 /** Below this share of Ix + Iy the product Ixy is the rounding of a sum that should vanish. */
 export const PRODUCT_ROUNDING_REL = 1e-13;
 
+/** A tilt of the axes below this (radians) is not one: a tenth of a nanometre on a metre. It keeps −90° from standing for 90°. */
+const TILT_RAD = 1e-10;
+
 /**
  * Principal second moments and the angle of axis 1.
  * @returns angle 0 and `any` true where I1 − I2 ≤ 1e-9 (I1 + I2), as for a circle or a square.
@@ -21,7 +24,7 @@ export const principalAxes = ({ Ix, Iy, Ixy }: SecondMoments): PrincipalAxes => 
   const radius = Math.hypot((Ix - Iy) / 2, Ixy);
   const I1 = mean + radius;
   if (2 * radius <= ROUND_REL * 2 * mean) return { I1, I2: mean - radius, angle: 0, any: true };
-  const product = Math.abs(Ixy) <= PRODUCT_ROUNDING_REL * 2 * mean ? 0 : Ixy;
+  const product = Math.abs(Ixy) <= TILT_RAD * 2 * radius ? 0 : Ixy;
   const I2 = product === 0 ? Math.min(Ix, Iy) : (Ix * Iy - Ixy * Ixy) / I1;
   const half = (Math.atan2(-2 * product, Ix - Iy) * 90) / Math.PI;
   const angle = half <= -90 ? 90 : half;

@@ -5,6 +5,7 @@ import { addMoments, NO_MOMENTS, regionMoments, type Moments } from "@/lib/geome
 import type { Point, Region } from "@/lib/geometry/region";
 import { err, ok, type Fault, type Result } from "@/lib/result";
 import { elasticOf, type ElasticValues } from "@/lib/section/elastic";
+import { everyNumberIsFinite } from "@/lib/section/finite";
 import { rearranged } from "@/lib/section/rearrange";
 import type { Section } from "@/lib/section/section";
 import { modularRatio, stiffParts, weightedBy } from "@/lib/section/stiffness";
@@ -107,7 +108,7 @@ const pieceOf = (elastic: ElasticValues, m: Moments, segments: readonly CutSegme
  * First moments and shear flow of what lies in all of the given half-planes, by connected pieces.
  * @param halfPlanes one for a straight cut, more to take off a flange or a tip; unit normals, drawing coordinates, mm.
  * @returns the pieces, largest first; none where nothing lies there. Faults: `cut.badHalfPlane` with a pointer,
- * `section.noArea`, `clip.failed`, or those of the arrangement. Flows are exact for lines and arcs, with unsymmetrical
+ * `section.noArea`, `section.notFinite`, `clip.failed`, or those of the arrangement. Flows are exact for lines and arcs, with unsymmetrical
  * bending; a piece cut off through several segments (as from a closed cell) has the sum of their flows only.
  * @source Jourawski: F = ∫n(a·x + b·y) dA over the piece, `stressGrowth` for a and b; VQ/I where x and y are principal.
  */
@@ -149,15 +150,14 @@ export const sectionCut = (
     one,
     piece: nearest(pieces, { x: (one.from.x + one.to.x) / 2, y: (one.from.y + one.to.y) / 2 }),
   }));
-  return ok(
-    sums
-      .map((m, i) =>
-        pieceOf(
-          elastic.values,
-          m,
-          segments.flatMap(({ one, piece }) => (piece === i ? [one] : [])),
-        ),
-      )
-      .sort((a, b) => b.area - a.area),
+  const cut = sums.map((m, i) =>
+    pieceOf(
+      elastic.values,
+      m,
+      segments.flatMap(({ one, piece }) => (piece === i ? [one] : [])),
+    ),
   );
+  return everyNumberIsFinite(cut)
+    ? ok(cut.toSorted((a, b) => b.area - a.area))
+    : err([{ code: "section.notFinite", detail: "The sizes are beyond what can be computed: check them." }]);
 };

@@ -79,7 +79,7 @@ export const sectionProperties = (section: Section): Result<SectionProperties> =
       values,
       parts.flatMap((part) => part.regions),
     ),
-    absent: torsionAbsent,
+    absent: [...torsionAbsent, ...plastic.absent],
     warnings: [...section.warnings, ...round, ...plastic.warnings],
   };
   return everyNumberIsFinite(properties)
