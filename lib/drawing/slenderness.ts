@@ -148,11 +148,24 @@ const profileFacts = (part: DrawingPart): Slenderness[] => {
       const d = part.shape.dimensions;
       return fact(id, "wall", "diameter over wall", d.diameter, d.thickness);
     }
+    case "zee": {
+      const d = part.shape.dimensions;
+      return [
+        ...fact(id, "flange", "face to free edge", d.flangeWidth - d.thickness, d.thickness),
+        ...fact(id, "web", "between faces", d.depth - 2 * d.thickness, d.thickness),
+      ];
+    }
+    case "lipped-channel": {
+      const d = part.shape.dimensions;
+      return [
+        ...fact(id, "lip", "face to free edge", d.lip - d.thickness, d.thickness),
+        ...fact(id, "flange", "between faces", d.flangeWidth - 2 * d.thickness, d.thickness),
+        ...fact(id, "web", "between faces", d.depth - 2 * d.thickness, d.thickness),
+      ];
+    }
     case "flat":
     case "round":
     case "timber":
-    case "zee":
-    case "lipped-channel":
       return [];
   }
 };

@@ -10,8 +10,8 @@ export const ROUND_REL = 1e-9;
 /** Below this share of Ix + Iy the product Ixy is the rounding of a sum that should vanish. */
 export const PRODUCT_ROUNDING_REL = 1e-13;
 
-/** A tilt of the axes below this (radians) is not one: a tenth of a nanometre on a metre. It keeps −90° from standing for 90°. */
-const TILT_RAD = 1e-10;
+/** A tilt of the axes below this (radians) is rounding of the coordinates. It keeps −90° from standing for 90°. */
+const TILT_RAD = 1e-12;
 
 /**
  * Principal second moments and the angle of axis 1.
