@@ -14,8 +14,15 @@ export type Below = Readonly<{ area: number; moment: number; width: number }>;
  */
 export type Strips = Readonly<{ sMin: number; sMax: number; below: (d: number) => Below }>;
 
-/** An arc with the directions of its chord frame resolved across (s) and along (t) the line. */
-type Curve = Readonly<{
+/**
+ * An arc with the directions of its chord frame resolved across (s) and along (t) the line; `low` and `high` are the
+ * heights it reaches, and `whole` what it adds where all of it lies below: its chord, and area and ∫s dA of its segment.
+ */
+type Curve = Frame & Readonly<{ low: number; high: number; whole: Whole }>;
+
+type Whole = Readonly<{ s0: number; s1: number; rise: number; area: number; first: number }>;
+
+type Frame = Readonly<{
   arc: ChordArc;
   middle: number;
   us: number;
@@ -41,28 +48,43 @@ const addLine = (sum: Sum, s0: number, s1: number, rise: number, d: number): voi
   sum.width -= dt;
 };
 
-/** The stretch of arc between two places, all of it below the line: its chord and the segment beside the chord. */
-const addStretch = (sum: Sum, curve: Curve, from: number, to: number, d: number): void => {
-  const { arc, middle, us, ut, vs, vt, weight } = curve;
-  const [p, q] = [onChordArc(arc, from), onChordArc(arc, to)];
-  const [s0, s1] = [middle + us * p.u + vs * p.v, middle + us * q.u + vs * q.v];
+/** The stretch of arc between two places: its chord and the segment beside the chord. */
+const stretchOf = (frame: Frame, from: number, to: number): Whole => {
+  const { arc, middle, us, ut, vs, vt, weight } = frame;
+  const p = onChordArc(arc, from);
+  const q = onChordArc(arc, to);
+  const s0 = middle + us * p.u + vs * p.v;
+  const s1 = middle + us * q.u + vs * q.v;
   const rise = weight * (ut * (q.u - p.u) + vt * (q.v - p.v));
-  // An end that the line cuts lies on it up to rounding: its height is clamped, and the width taken whole.
-  addLine(sum, Math.min(s0, d), Math.min(s1, d), rise, d);
-  if (s0 >= d && s1 >= d) sum.width -= rise;
-  const [psi0, psi1] = [2 * Math.atan(arc.bulge * from), 2 * Math.atan(arc.bulge * to)];
+  const psi0 = 2 * Math.atan(arc.bulge * from);
+  const psi1 = 2 * Math.atan(arc.bulge * to);
   const bulge = Math.tan((psi1 - psi0) / 4);
   const chord = Math.hypot(q.u - p.u, q.v - p.v);
-  if (!(chord > 0 && bulge > 0)) return;
+  if (!(chord > 0 && bulge > 0)) return { s0, s1, rise, area: 0, first: 0 };
   const segment = segmentIntegrals(chord, bulge);
   const psi = (psi0 + psi1) / 2;
   const towards = us * Math.sin(psi) + vs * Math.cos(psi);
-  sum.area += arc.sign * weight * segment.area;
-  sum.moment += arc.sign * weight * ((d - (s0 + s1) / 2) * segment.area - towards * segment.v);
+  const signed = arc.sign * weight;
+  return {
+    s0,
+    s1,
+    rise,
+    area: signed * segment.area,
+    first: signed * (((s0 + s1) / 2) * segment.area + towards * segment.v),
+  };
+};
+
+/** Adds a stretch of arc all of which lies below the line. */
+const addStretch = (sum: Sum, { s0, s1, rise, area, first }: Whole, d: number): void => {
+  // An end that the line cuts lies on it up to rounding: its height is clamped, and the width taken whole.
+  addLine(sum, Math.min(s0, d), Math.min(s1, d), rise, d);
+  if (s0 >= d && s1 >= d) sum.width -= rise;
+  sum.area += area;
+  sum.moment += d * area - first;
 };
 
 /** Places −1 < x < 1 at which the arc meets the line s = d, in order. */
-const crossings = ({ arc, middle, us, vs }: Curve, d: number): readonly number[] => {
+const crossings = ({ arc, middle, us, vs }: Frame, d: number): readonly number[] => {
   // onChordArc put into s(x) = d, multiplied out: p·x² + q·x + r = 0.
   const b = arc.bulge;
   const h = (d - middle) / arc.half;
@@ -75,19 +97,21 @@ const crossings = ({ arc, middle, us, vs }: Curve, d: number): readonly number[]
   return [w / p, r / w].filter((x) => x > -1 && x < 1).sort((x, y) => x - y);
 };
 
-const heightAt = ({ arc, middle, us, vs }: Curve, x: number): number => {
+const heightAt = ({ arc, middle, us, vs }: Frame, x: number): number => {
   const { u, v } = onChordArc(arc, x);
   return middle + us * u + vs * v;
 };
 
 const addCurve = (sum: Sum, curve: Curve, d: number): void => {
+  if (curve.low >= d) return;
+  if (curve.high <= d) return addStretch(sum, curve.whole, d);
   const places = [-1, ...crossings(curve, d), 1];
   for (let i = 0; i + 1 < places.length; i += 1) {
     const [from = -1, to = 1] = [places[i], places[i + 1]];
     // The ends of a stretch may lie on the line, and so may the middle of one that touches it: the furthest decides.
     const heights = [from, (from + to) / 2, to].map((x) => heightAt(curve, x) - d);
     const furthest = heights.reduce((far, h) => (Math.abs(h) > Math.abs(far) ? h : far));
-    if (furthest < 0) addStretch(sum, curve, from, to, d);
+    if (furthest < 0) addStretch(sum, stretchOf(curve, from, to), d);
   }
 };
 
@@ -122,13 +146,16 @@ export const stripsAlong = (sets: readonly WeightedRegions[], normal: Point, ori
     }
     const middle = sOf(arc.middle);
     const [us, vs] = [across(arc.along), across(arc.towards)];
-    const curve: Curve = { arc, middle, us, vs, ut: along(arc.along), vt: along(arc.towards), weight };
-    curves.push(curve);
+    const frame: Frame = { arc, middle, us, vs, ut: along(arc.along), vt: along(arc.towards), weight };
+    const heights = [s0, s1];
     for (const direction of [normal, { x: -normal.x, y: -normal.y }]) {
       const x = furthestOnChordArc(arc, direction);
-      if (x === null) continue;
-      reach(heightAt(curve, x));
+      if (x !== null) heights.push(heightAt(frame, x));
     }
+    const [low, high] = [Math.min(...heights), Math.max(...heights)];
+    reach(low);
+    reach(high);
+    curves.push({ ...frame, low, high, whole: stretchOf(frame, -1, 1) });
   };
   for (const { regions, weight } of sets)
     for (const region of regions)
