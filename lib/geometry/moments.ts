@@ -186,6 +186,41 @@ const weightedMoments = (sets: readonly WeightedRegions[], origin: Point): Momen
   };
 };
 
+/** Weighted area and first moments only: the first pass towards the centroid. */
+const roughCentroid = (sets: readonly WeightedRegions[], origin: Point): Point | null => {
+  const ox = origin.x;
+  const oy = origin.y;
+  let a = 0;
+  let mx = 0;
+  let my = 0;
+  let arcs = NO_MOMENTS;
+  for (const { regions, weight } of sets)
+    for (const { outer, holes } of regions)
+      for (let k = -1; k < holes.length; k += 1) {
+        const ring = k < 0 ? outer : (holes[k] ?? []);
+        let from = ring[ring.length - 1];
+        if (from === undefined) continue;
+        let x0 = from.x - ox;
+        let y0 = from.y - oy;
+        for (const to of ring) {
+          const x1 = to.x - ox;
+          const y1 = to.y - oy;
+          const c = weight * (x0 * y1 - x1 * y0);
+          a += c;
+          mx += c * (x0 + x1);
+          my += c * (y0 + y1);
+          if (from.bulge !== undefined && from.bulge !== 0)
+            arcs = addMoments(arcs, segmentMoments(from, to, from.bulge, origin), weight);
+          from = to;
+          x0 = x1;
+          y0 = y1;
+        }
+      }
+  const area = a / 2 + arcs.area;
+  if (!(area > 0)) return null;
+  return { x: origin.x + (mx / 6 + arcs.x) / area, y: origin.y + (my / 6 + arcs.y) / area };
+};
+
 /**
  * Moments of regions (outer rings less their holes) to third order, about `origin`.
  * @param regions rings of lines and arcs, mm; anticlockwise counts positive, clockwise negative.
@@ -213,8 +248,6 @@ export type CentralMoments = Readonly<{ centroid: Point; moments: Moments }>;
 export const centralMoments = (sets: readonly WeightedRegions[]): CentralMoments | null => {
   const first = sets.find((set) => set.regions.length > 0)?.regions[0]?.outer[0];
   if (first === undefined) return null;
-  const rough = weightedMoments(sets, first);
-  if (!(rough.area > 0)) return null;
-  const centroid = { x: first.x + rough.x / rough.area, y: first.y + rough.y / rough.area };
-  return { centroid, moments: weightedMoments(sets, centroid) };
+  const centroid = roughCentroid(sets, first);
+  return centroid === null ? null : { centroid, moments: weightedMoments(sets, centroid) };
 };
