@@ -6,6 +6,9 @@ import { NuqsAdapter } from "nuqs/adapters/next/app";
 import { useState, type ReactNode } from "react";
 import { makeQueryClient } from "@/lib/client/query-client";
 
+/** The policy allows no code made of text, which zod probes for: it is told before any schema is made, without loading it. */
+Object.assign(globalThis, { __zod_globalConfig: { jitless: true } });
+
 type ProvidersProps = Readonly<{ nonce: string; children: ReactNode }>;
 
 /** What every page stands in: theme, the cache of what was fetched, state in the address, the nonce for Radix. */

@@ -1,6 +1,6 @@
 import { Gauge } from "@/components/goods-in/gauge";
 import { FileFigure, OffFigure } from "@/components/goods-in/file-figure";
-import { Detail, FieldSymbol, FileUnit } from "@/components/goods-in/words";
+import { FieldSymbol, FileUnit } from "@/components/goods-in/words";
 import { cx } from "@/components/ui/cx";
 import { Table, Td, Th, Tr } from "@/components/ui/table";
 import type { RowDetail } from "@/lib/schemas/delivery";
@@ -64,9 +64,11 @@ export const ComparisonTable = ({ row, gauge = true }: Readonly<{ row: RowDetail
               <FieldSymbol field={u.key} />
             </Td>
             <Td>
-              <Detail text={u.unit} />
+              <FileUnit unit={u.unit} />
             </Td>
-            <Td numeric>{u.written}</Td>
+            <Td numeric>
+              <FileFigure value={u.tabulated} unit={u.unit} like={u.written} />
+            </Td>
             <Td colSpan={gauge ? 3 : 2} className="text-right text-note">
               not compared: a formula’s value
             </Td>

@@ -87,30 +87,32 @@ export function DecideForm({ delivery, row, onNext, onRefused }: DecideFormProps
     >
       <fieldset className="grid border-t border-rule px-3 py-1.5">
         <legend className="sr-only">What is to be done with this row</legend>
-        {CHOICES.map(({ value, label, key }) => (
-          <label
-            key={value}
-            className={cx(
-              "flex h-[26px] items-center gap-[9px] max-md:h-11",
-              choice === value && "font-[600]",
-              !possible(value) && "text-ink-3",
-            )}
-          >
-            <input
-              type="radio"
-              name={name}
-              value={value}
-              checked={choice === value}
-              disabled={!possible(value)}
-              onChange={() => pick(value)}
-              className="size-[15px] flex-none appearance-none rounded-pin border border-edge bg-field checked:border-[4.5px] checked:border-oxide-ink disabled:border-dotted"
-            />
-            {label}
-            {!possible(value) && <span className="text-note">not possible for this row</span>}
-            <span className="flex-1" />
-            <Kbd>{key}</Kbd>
-          </label>
-        ))}
+        {CHOICES.filter(({ value }) => row.verdict !== "accepted" || possible(value)).map(
+          ({ value, label, key }) => (
+            <label
+              key={value}
+              className={cx(
+                "flex h-[26px] items-center gap-[9px] max-md:h-11",
+                choice === value && "font-[600]",
+                !possible(value) && "text-ink-3",
+              )}
+            >
+              <input
+                type="radio"
+                name={name}
+                value={value}
+                checked={choice === value}
+                disabled={!possible(value)}
+                onChange={() => pick(value)}
+                className="size-[15px] flex-none appearance-none rounded-pin border border-edge bg-field checked:border-[4.5px] checked:border-oxide-ink disabled:border-dotted"
+              />
+              {label}
+              {!possible(value) && <span className="text-note">not possible for this row</span>}
+              <span className="flex-1" />
+              <Kbd>{key}</Kbd>
+            </label>
+          ),
+        )}
       </fieldset>
       {choice === "tabulated" && (
         <div className="px-3 pb-2">

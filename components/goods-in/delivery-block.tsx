@@ -29,8 +29,8 @@ export function DeliveryBlock({ delivery, step, onStep, onRefused }: DeliveryBlo
   const reading = recognised?.reading ?? null;
   return (
     <TitleBlock>
-      <Cell label="Delivery" big className="font-num">
-        {delivery.code}
+      <Cell label="Delivery" big>
+        <span className="font-num">{delivery.code}</span>
       </Cell>
       <Cell label="File" fill stays="md">
         {delivery.fileName}
@@ -103,7 +103,9 @@ function Actions({ delivery, step, onStep, onRefused }: DeliveryBlockProps) {
           All deliveries
         </Link>
         <Button kind="main" className="px-[18px]" onClick={() => onStep("inspect")}>
-          Inspect <Count value={counts?.rows ?? 0} /> rows
+          <span>
+            Inspect <Count value={counts?.rows ?? 0} /> rows
+          </span>
         </Button>
       </ActionCell>
     );
@@ -139,12 +141,14 @@ function Actions({ delivery, step, onStep, onRefused }: DeliveryBlockProps) {
           disabled={undecided > 0 || kept === 0 || putAway.isPending}
           onClick={() => press(false)}
         >
-          Put away <Count value={kept} />
-          {undecided > 0 && (
-            <span>
-              , <Count value={undecided} /> left to decide
-            </span>
-          )}
+          <span>
+            Put away <Count value={kept} />
+            {undecided > 0 && (
+              <>
+                , <Count value={undecided} /> left to decide
+              </>
+            )}
+          </span>
         </Button>
       </ActionCell>
     );

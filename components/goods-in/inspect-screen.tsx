@@ -36,7 +36,7 @@ export function InspectScreen({ delivery, onRefused }: InspectScreenProps) {
   const decidable = delivery.state === "read";
   return (
     <div className="grid min-h-0 grid-cols-[minmax(0,1fr)_420px] max-lg:grid-cols-1">
-      <section aria-label="Rows" className="flex min-h-0 flex-col max-lg:min-h-[50dvh]">
+      <section aria-label="Rows" className="flex min-h-0 flex-col max-lg:max-h-[60dvh]">
         {delivery.counts && (
           <Tally
             counts={delivery.counts}

@@ -96,6 +96,11 @@ function RowHead({ row, undecided }: Readonly<{ row: RowDetail; undecided: numbe
 }
 
 function Happened({ row }: Readonly<{ row: RowDetail }>) {
+  const said =
+    row.reasons.length + row.built.length + row.mends.length > 0 ||
+    row.standing !== "" ||
+    row.decision !== null;
+  if (!said) return null;
   return (
     <div className="grid gap-2 border-t border-frame px-3 py-2.5 text-[13px] leading-[18px]">
       {row.reasons.length > 0 && (

@@ -10,6 +10,8 @@ const NAMES: Record<Step, string> = {
   away: "Put away",
 };
 
+const SHORT: Record<Step, string> = { unload: "Unload", columns: "Match", inspect: "Inspect", away: "Away" };
+
 type StepChainProps = Readonly<{ now: Step; reach: Step; onStep?: (step: Step) => void }>;
 
 /** The four steps as a chain dimension: done in ink, the present one in oxide. */
@@ -53,7 +55,7 @@ const StepName = ({ i, step }: { i: number; step: Step }) => (
   <span>
     {i + 1}&ensp;<span className="max-sm:sr-only">{NAMES[step]}</span>
     <span aria-hidden className="sm:hidden">
-      {NAMES[step].split(" ")[0]}
+      {SHORT[step]}
     </span>
   </span>
 );

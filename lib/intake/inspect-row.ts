@@ -18,7 +18,7 @@ import {
   type FieldKey,
   type UncomparedKey,
 } from "@/lib/intake/fields";
-import { FILE_UNITS } from "@/lib/intake/file-units";
+import { FILE_UNITS, type FileUnitKey } from "@/lib/intake/file-units";
 import { familyOfRow, type FamilyFound } from "@/lib/intake/family-of-row";
 import { likelyCauses, type Neighbours } from "@/lib/intake/likely-cause";
 import { profileOfRow, type ProfileBuilt } from "@/lib/intake/profile-of-row";
@@ -45,7 +45,12 @@ export type Inspection = Readonly<{
   properties: SectionProperties | null;
   comparisons: readonly Comparison[];
   /** Taken from the table and not compared (J, Cw): printed values are formulas, not solutions. */
-  uncompared: readonly Readonly<{ key: UncomparedKey; tabulated: number; written: string; unit: string }>[];
+  uncompared: readonly Readonly<{
+    key: UncomparedKey;
+    tabulated: number;
+    written: string;
+    unit: FileUnitKey;
+  }>[];
   consistency: readonly Consistency[];
   /** Key of the figure farthest from its gauge. */
   worst: Comparison | null;
@@ -86,6 +91,7 @@ export function inspectRow(row: TypedRow, reading: Reading, options: InspectOpti
         ? likelyCauses({ row, computed, comparisons, neighbours: options.neighbours, marks })
         : [slip]),
     );
+    if (comparisons.length === 0 && reasons.length === 0) reasons.push(NOTHING_COMPARED);
     if (row.blanks.includes("area")) reasons.push(blankReason("area", computed, reading));
   } else row.ambiguous.forEach((a) => reasons.push(ambiguousReason(a, null, reading)));
   return {
@@ -105,7 +111,7 @@ export function inspectRow(row: TypedRow, reading: Reading, options: InspectOpti
       const measure = row.figures[key];
       return measure === undefined
         ? []
-        : [{ key, tabulated: measure.value, written: measure.written, unit: FILE_UNITS[measure.unit].label }];
+        : [{ key, tabulated: measure.value, written: measure.written, unit: measure.unit }];
     }),
     consistency:
       computed === null ? [] : consistencyOf(row, computed, STOCK_MATERIAL[reading.material].density),
@@ -114,6 +120,12 @@ export function inspectRow(row: TypedRow, reading: Reading, options: InspectOpti
     verdict: verdictOf(reasons),
   };
 }
+
+const NOTHING_COMPARED: RowReason = {
+  verdict: "queried",
+  cause: "no-figures",
+  detail: "No figure is printed beside the dimensions: it was drawn and computed, but nothing could be checked.",
+};
 
 /** A row whose fields cannot be told apart: computing it would only add noise to the one reason that matters. */
 const broken = (row: TypedRow) =>

@@ -26,6 +26,7 @@ export const CAUSES = {
   "neighbour-row": "neighbour row",
   dimension: "a dimension",
   derived: "made from another figure",
+  "no-figures": "nothing tabulated to compare",
   convention: "convention of the table",
   "just-outside": "just outside the gauge",
   unexplained: "no cause found",

@@ -197,7 +197,7 @@ export const RowDetail = z.strictObject({
         key: z.enum(UNCOMPARED_KEYS),
         tabulated: z.number(),
         written: z.string(),
-        unit: z.string(),
+        unit,
       }),
     )
     .readonly(),
