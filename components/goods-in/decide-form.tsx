@@ -38,10 +38,15 @@ export function DecideForm({ delivery, row, onNext, onRefused }: DecideFormProps
     setChoice(value);
     decide.reset();
   };
-  useShortcut("k", () => pick("computed"));
-  useShortcut("t", () => pick("tabulated"));
-  useShortcut("m", () => pick("mend"));
-  useShortcut("x", () => pick("leave-out"));
+  // The letter must not land in the field that its choice brings up.
+  const byKey = (value: Choice) => (event: KeyboardEvent) => {
+    event.preventDefault();
+    pick(value);
+  };
+  useShortcut("k", byKey("computed"));
+  useShortcut("t", byKey("tabulated"));
+  useShortcut("m", byKey("mend"));
+  useShortcut("x", byKey("leave-out"));
 
   const missing =
     choice === null

@@ -124,7 +124,8 @@ export function inspectRow(row: TypedRow, reading: Reading, options: InspectOpti
 const NOTHING_COMPARED: RowReason = {
   verdict: "queried",
   cause: "no-figures",
-  detail: "No figure is printed beside the dimensions: it was drawn and computed, but nothing could be checked.",
+  detail:
+    "No figure is printed beside the dimensions: it was drawn and computed, but nothing could be checked.",
 };
 
 /** A row whose fields cannot be told apart: computing it would only add noise to the one reason that matters. */

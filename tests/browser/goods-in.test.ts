@@ -65,14 +65,20 @@ test("the table with defects is decided by keyboard, mended, and what is undecid
   await page.getByRole("button", { name: "Leave them out by name" }).click();
   await page.getByRole("link", { name: "See them on the Rack" }).waitFor();
   await page.reload();
-  await page.getByText(/left out/).first().waitFor();
+  await page
+    .getByText(/left out/)
+    .first()
+    .waitFor();
 });
 
 test("a file in another encoding is confirmed on its own lines; one that is no table is given back", async () => {
   const librarian = await person({ as: "librarian" });
   const { page } = librarian;
   await page.goto("/goods-in");
-  const bytes = Buffer.from("Bezeichnung;Reihe;h [mm];b [mm];tw [mm];tf [mm];r [mm];A [cm2];Bemerkung\nIPE 201;IPE;200;100;5,6;8,5;12;28,48;Tr\u00e4ger\n", "latin1");
+  const bytes = Buffer.from(
+    "Bezeichnung;Reihe;h [mm];b [mm];tw [mm];tf [mm];r [mm];A [cm2];Bemerkung\nIPE 201;IPE;200;100;5,6;8,5;12;28,48;Tr\u00e4ger\n",
+    "latin1",
+  );
   await page.setInputFiles("input[type=file]", { name: "alt.csv", mimeType: "text/csv", buffer: bytes });
   await page.getByRole("combobox", { name: "Into bay" }).click();
   await page.getByRole("option", { name: /Rolled beams/ }).click();
@@ -88,20 +94,23 @@ test.each([
   [768, "dark"],
   [390, "light"],
   [320, "dark"],
-] as const)("at %i px in the %s theme everything is there and nothing scrolls sideways", async (width, theme) => {
-  const librarian = await person({ as: "librarian", width, theme, height: width < 400 ? 844 : 1024 });
-  const { page } = librarian;
-  await page.goto("/goods-in");
-  await page.getByText("Bring in a delivery").waitFor();
-  await expectNoSidewaysScroll(page);
-  await expectAccessible(page);
-  await picture(page, `goods-in-${width}`);
-  await page.getByRole("link", { name: /D-000/ }).first().click();
-  await page.getByRole("complementary", { name: "Row in hand" }).waitFor();
-  await expectNoSidewaysScroll(page);
-  await expectAccessible(page);
-  await picture(page, `goods-in-inspect-${width}`);
-});
+] as const)(
+  "at %i px in the %s theme everything is there and nothing scrolls sideways",
+  async (width, theme) => {
+    const librarian = await person({ as: "librarian", width, theme, height: width < 400 ? 844 : 1024 });
+    const { page } = librarian;
+    await page.goto("/goods-in");
+    await page.getByText("Bring in a delivery").waitFor();
+    await expectNoSidewaysScroll(page);
+    await expectAccessible(page);
+    await picture(page, `goods-in-${width}`);
+    await page.getByRole("link", { name: /D-000/ }).first().click();
+    await page.getByRole("complementary", { name: "Row in hand" }).waitFor();
+    await expectNoSidewaysScroll(page);
+    await expectAccessible(page);
+    await picture(page, `goods-in-inspect-${width}`);
+  },
+);
 
 test("a designer is told who takes deliveries in", async () => {
   const { page } = await person({ as: "designer" });
