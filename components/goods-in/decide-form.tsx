@@ -147,7 +147,7 @@ export function DecideForm({ delivery, row, onNext, onRefused }: DecideFormProps
             " Both states: what you see is now the stored one; decide again if it still holds."}
         </p>
       )}
-      <div className="flex gap-2 px-3 pt-1 pb-2.5">
+      <div className="sticky bottom-0 flex gap-2 bg-sheet px-3 pt-1 pb-2.5">
         <Button type="submit" className="h-8 flex-1" disabled={missing !== null || decide.isPending}>
           {choice === "mend"
             ? "Mend and read again"

@@ -60,7 +60,7 @@ export function RowPane({ delivery, number, decidable, onNext, onRefused }: RowP
                 <ShapeFigure
                   drawing={row.drawing}
                   properties={row.properties}
-                  fit={{ width: 396, height: 216 }}
+                  fit={{ width: 396, height: 188 }}
                   show={SHOW}
                   label={`Section of ${row.designation === "" ? `row ${row.number}` : row.designation}`}
                 />

@@ -158,11 +158,13 @@ function RowCells({ row, narrow }: Readonly<{ row: RowSummary; narrow: boolean }
       )}
       <Td
         className={cx(
-          "min-w-[180px] text-[13px] leading-4 whitespace-normal",
+          "min-w-[180px] text-[13px] leading-4 whitespace-normal!",
           row.verdict === "accepted" && "text-ink-3",
         )}
       >
-        <Reason row={row} />
+        <span className="line-clamp-2">
+          <Reason row={row} />
+        </span>
       </Td>
     </>
   );
