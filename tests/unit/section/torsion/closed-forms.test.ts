@@ -68,7 +68,6 @@ test.each([
     const regions = must(
       bore > 0
         ? profileRegions({
-            kind: "profile",
             family: "round-hollow",
             dimensions: { diameter: d, thickness: wall },
           })
@@ -100,7 +99,6 @@ test.each([
     "thin tube of 1000 × 2",
     must(
       profileRegions({
-        kind: "profile",
         family: "round-hollow",
         dimensions: { diameter: 1000, thickness: 2 },
       }),
