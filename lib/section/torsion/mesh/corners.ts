@@ -20,7 +20,6 @@ export type Corners = Readonly<{ corners: readonly Corner[]; acute: readonly boo
 const REENTRANT = (210 / 180) * Math.PI;
 const SHARP = (150 / 180) * Math.PI;
 const ACUTE = Math.PI / 3;
-const STRAIGHT = (2 / 180) * Math.PI;
 const TURN = 2 * Math.PI;
 
 /** Element size over the local feature size at re-entrant and at sharp convex corners. */
@@ -84,7 +83,10 @@ const kindOf = (around: readonly Spoke[], materialOf: (region: number) => string
   const solid = wedges.filter((wedge) => wedge.material !== "");
   const meeting = new Set(solid.map((wedge) => wedge.material)).size > 1;
   if (meeting) {
-    const smooth = wedges.length === 2 && wedges.every((wedge) => Math.abs(wedge.angle - Math.PI) < STRAIGHT);
+    const smooth =
+      wedges.length === 2 &&
+      solid.length === 2 &&
+      solid.every(({ angle }) => angle > SHARP && angle < REENTRANT);
     return smooth ? null : { share: REENTRANT_SHARE, reentrant: true };
   }
   if (solid.some((wedge) => wedge.angle > REENTRANT)) return { share: REENTRANT_SHARE, reentrant: true };
