@@ -11,6 +11,8 @@ const Row = z.object({
   value: z.number(),
   unit: z.string(),
   tol: z.number().positive(),
+  tolFormula: z.number().positive().nullish(),
+  feRef: z.number().nullish(),
   source: z.string().min(1),
   provenance: z.string().min(1),
   note: z.string().optional(),
@@ -38,10 +40,14 @@ export const UNIT_VALUE: Readonly<Record<string, number>> = {
   cm2: 100,
   cm3: 1000,
   cm4: 10_000,
+  cm6: 1e6,
+  "10^3 cm6": 1e9,
+  mm6: 1,
   in: IN,
   in2: IN ** 2,
   in3: IN ** 3,
   in4: IN ** 4,
+  in6: IN ** 6,
   "kg/m": 1,
 };
 
