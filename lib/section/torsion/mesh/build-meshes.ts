@@ -1,6 +1,6 @@
 import type { Point } from "@/lib/geometry/region";
 import type { Result } from "@/lib/result";
-import { err, ok } from "@/lib/result";
+import { ok } from "@/lib/result";
 import {
   bodiesOf,
   boundaryGraph,
@@ -67,6 +67,10 @@ function* meshAll(
   const graph = boundaryGraph(regions, options.chordsPerCircle);
   if (!graph.ok) return graph;
   const bodies = bodiesOf(graph.value, regions.length);
+  const several = bodies.some((body) => body !== bodies[0]);
+  // Each body is meshed by itself: that they do not cross one another shows only in a triangulation of them all.
+  const whole = several ? triangulate(graph.value) : null;
+  if (whole !== null && !whole.ok) return whole;
   const meshes: BodyMesh[] = [];
   for (let body = 0; body <= Math.max(...bodies); body++) {
     const made = yield* meshBody(graphOfBody(graph.value, bodies, body), regions, options, pacer);
@@ -94,7 +98,7 @@ export function* buildMeshes(
       [region.outer, ...region.holes].some((ring) => ring.some((v) => (v.bulge ?? 0) !== 0)),
     );
     const retry = !made.ok && made.error.code === "torsion.crossing" && curved && chords < FINEST_CHORDS;
-    if (!retry) return made.ok || made.error.code !== "torsion.crossing" ? made : err(made.error);
+    if (!retry) return made;
     chords = Math.min(FINEST_CHORDS, chords * FINER);
   }
 }

@@ -112,3 +112,39 @@ test.each([
   expectRel(found.Avx, Avx, { rel });
   expectRel(found.Avy, Avy, { rel });
 });
+
+/**
+ * Isosceles right-angled triangle of legs a: J = 0.026090 a⁴.
+ * @source Timoshenko & Goodier, Theory of Elasticity, art. 109 (B. Galerkin 1919); five digits, from memory, and checked
+ * here by the bounds, which do not depend on it.
+ */
+test("a right-angled triangle, whose angles of 45° are meshed in shells, has Galerkin's J", () => {
+  const region = {
+    outer: [
+      { x: 0, y: 0 },
+      { x: 100, y: 0 },
+      { x: 0, y: 100 },
+    ],
+    holes: [],
+  };
+  const { J, JBounds } = connectedTorsion(sectionOfRegions([region]));
+  expectRel(J, 0.02609e8, { rel: 5e-4 });
+  expect((JBounds.upper - JBounds.lower) / J).toBeLessThan(1e-4);
+});
+
+/** A wedge of 5°: meshed in shells, it must end, and agree with the thin tapered strip J = ∫t³/3. */
+test("a wedge with an angle of 5° is meshed and has the J of a tapered strip", () => {
+  const [length, half] = [200, 200 * Math.tan((2.5 / 180) * Math.PI)];
+  const region = {
+    outer: [
+      { x: 0, y: 0 },
+      { x: length, y: -half },
+      { x: length, y: half },
+    ],
+    holes: [],
+  };
+  const { J } = connectedTorsion(sectionOfRegions([region]));
+  const thick = 2 * half;
+  // The strip tapers: t³ integrates to L·t³/4; the blunt end costs 0.105·t⁴, half of a strip's two ends.
+  expectRel(J, (length * thick ** 3) / 12 - 0.105 * thick ** 4, { rel: 1e-2 });
+});

@@ -1,0 +1,9 @@
+import fc from "fast-check";
+import { test } from "vitest";
+import { expectWithinEstimates } from "@/tests/helpers/check-estimates";
+import { connectedSection } from "@/tests/helpers/random-sections";
+
+/** fast-check prints the seed of a failure; tests/long runs two hundred. */
+test("random connected sections lie within their own estimates of a much finer solution", () => {
+  fc.assert(fc.property(connectedSection, expectWithinEstimates), { numRuns: 8 });
+});
