@@ -10,7 +10,7 @@ const underDrawing = (fault: Fault): Fault => ({ ...fault, pointer: `/drawing${f
 
 /** The figures of a drawing, by the engine, in a thread; a drawing that has none is refused with what is wrong and where. */
 export const computeFigures = async (drawing: Drawing, signal?: AbortSignal): Promise<ComputedProperties> => {
-  const result = await computePool().run(drawing, signal ? { signal } : {});
+  const result = await computePool().run({ kind: "properties", drawing }, signal ? { signal } : {});
   if (result.ok) return { properties: result.value, engineVersion: ENGINE_VERSION };
   const issues = result.error.map(underDrawing);
   throw new AppError("invalid", {

@@ -3,23 +3,24 @@ import { availableParallelism } from "node:os";
 import { Worker } from "node:worker_threads";
 import type { Drawing } from "@/lib/drawing/schema";
 import { AppError } from "@/lib/errors";
-import type { Fault, Result } from "@/lib/result";
-import type { SectionProperties } from "@/lib/section/properties";
-import type { ComputeReply, ComputeRequest } from "./messages";
+import type { Computed, ComputeReply, ComputeRequest, ComputeTask } from "./messages";
 
 export const COMPUTE_LIMIT_MS = 10_000;
 /** More waiting than this and the server says it is busy instead of promising. */
 const MAX_WAITING = 200;
 
-type Computed = Result<SectionProperties, readonly Fault[]>;
 type Task = Readonly<{
-  drawing: Drawing;
+  asked: ComputeTask;
   limitMs: number;
   signal: AbortSignal | undefined;
-  resolve: (value: Computed) => void;
+  resolve: (value: ComputeReply["result"]) => void;
   reject: (error: Error) => void;
 }>;
 type Thread = { worker: Worker; task: Task | null; timer: NodeJS.Timeout | null; seq: number };
+
+/** Safe: a thread answers a task by its kind. */
+const answerOf = <K extends ComputeTask["kind"]>(result: ComputeReply["result"]): Computed<K> =>
+  result as Computed<K>;
 
 const stopped = () => new AppError("unreadable", { user: "The computation was stopped." });
 const tooLong = (limitMs: number) =>
@@ -54,13 +55,15 @@ export class ComputePool {
 
   /** Starts the threads and computes one plate in each, so that the first person does not wait for it. */
   async warmUp(plate: Drawing): Promise<void> {
-    await Promise.all(Array.from({ length: this.size }, () => this.run(plate)));
+    await Promise.all(
+      Array.from({ length: this.size }, () => this.run({ kind: "properties", drawing: plate })),
+    );
   }
 
-  run(
-    drawing: Drawing,
+  run<T extends ComputeTask>(
+    asked: T,
     options: Readonly<{ limitMs?: number; signal?: AbortSignal }> = {},
-  ): Promise<Computed> {
+  ): Promise<Computed<T["kind"]>> {
     const { limitMs = COMPUTE_LIMIT_MS, signal } = options;
     if (this.closed || signal?.aborted) return Promise.reject(stopped());
     if (this.waiting.length >= MAX_WAITING) {
@@ -71,12 +74,12 @@ export class ComputePool {
         }),
       );
     }
-    return new Promise<Computed>((resolve, reject) => {
-      const task: Task = { drawing, limitMs, signal, resolve, reject };
+    return new Promise<ComputeReply["result"]>((resolve, reject) => {
+      const task: Task = { asked, limitMs, signal, resolve, reject };
       signal?.addEventListener("abort", () => this.abort(task), { once: true });
       this.waiting.push(task);
       this.next();
-    });
+    }).then((result) => answerOf<T["kind"]>(result));
   }
 
   async close(): Promise<void> {
@@ -99,7 +102,7 @@ export class ComputePool {
       thread.task = task;
       thread.seq += 1;
       thread.timer = setTimeout(() => this.end(thread, tooLong(task.limitMs)), task.limitMs);
-      const request: ComputeRequest = { seq: thread.seq, drawing: task.drawing };
+      const request: ComputeRequest = { seq: thread.seq, task: task.asked };
       thread.worker.postMessage(request);
     }
   }
