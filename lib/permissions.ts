@@ -1,5 +1,5 @@
 import { AppError } from "@/lib/errors";
-import { RIGHTS, type Actor, type Right, type Role } from "@/lib/schemas/access";
+import { RIGHTS, ROLES, type Actor, type Right, type Role } from "@/lib/schemas/access";
 
 type Ask =
   | Readonly<{ public: true }>
@@ -96,6 +96,7 @@ export const VERBS = {
   "right.list": admin,
   "right.put": admin,
   "rightRequest.list": signedIn,
+  "rightRequest.listAll": admin,
   "rightRequest.create": signedIn,
   "rightRequest.decide": admin,
   "invitation.list": admin,
@@ -106,6 +107,7 @@ export const VERBS = {
   "token.list": signedIn,
   "token.create": signedIn,
   "token.revoke": signedIn,
+  "token.manageAll": admin,
   "letter.list": admin,
   "log.list": admin,
   "log.export": admin,
@@ -159,6 +161,13 @@ export const couldEver = (actor: Actor, verb: Verb): boolean => {
     return elsewhere || also.length > 0;
   }
   return true;
+};
+
+/** Roles to which a verb is open whatever rights they were granted. */
+export const rolesThatMay = (verb: Verb): readonly Role[] => {
+  const ask = askOf(verb);
+  if ("roles" in ask) return ask.roles;
+  return "inBay" in ask ? ROLES.filter((role) => atLeast(RIGHT_OF_ROLE[role], ask.inBay)) : ROLES;
 };
 
 /** First line of every verb: refuses an actor who may not do this anywhere. */

@@ -1,13 +1,17 @@
 import "server-only";
 import { and, eq, gt, isNull, or } from "drizzle-orm";
-import type { Reader } from "@/db/client";
+import type { Reader, Tx } from "@/db/client";
 import { memberships } from "@/db/schema/memberships";
 import { rights } from "@/db/schema/rights";
 import { users } from "@/db/schema/users";
 import type { Actor, Right } from "@/lib/schemas/access";
 
 /** Rights granted beside the role that hold now, by bay; `all` for the whole Rack. */
-const rightsOf = async (read: Reader, membershipId: string, now: number): Promise<Record<string, Right>> => {
+const rightsOf = async (
+  read: Pick<Reader | Tx, "select">,
+  membershipId: string,
+  now: number,
+): Promise<Record<string, Right>> => {
   const rows = await read
     .select({ bayId: rights.bayId, right: rights.right })
     .from(rights)
@@ -17,7 +21,7 @@ const rightsOf = async (read: Reader, membershipId: string, now: number): Promis
 
 /** The membership of a person in an organisation as it stands now; null when there is none or it is suspended. */
 export const loadActor = async (
-  read: Reader,
+  read: Pick<Reader | Tx, "select">,
   who: Readonly<{ userId: string; organisationId: string; via: Actor["via"] }>,
   now: number,
 ): Promise<Actor | null> => {

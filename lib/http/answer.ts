@@ -25,4 +25,4 @@ export const json = (value: unknown, options: Options = {}): Response => {
 };
 
 export const noContent = (options: Options = {}): Response =>
-  new Response(null, { status: 204, headers: headersOf(options) });
+  new Response(null, { status: options.status ?? 204, headers: headersOf(options) });

@@ -119,6 +119,9 @@ export const route =
       const who = await authenticate(db, request.headers, now);
       if (who === null)
         throw new AppError("signedOut", { user: "Sign in first; your session may have ended." });
+      if (who.readOnly && isChange(request) && verb !== "properties.compute") {
+        throw new AppError("forbidden", { user: "This token may only read." });
+      }
       ids = { ...ids, person: who.actor.userId, organisation: who.actor.organisationId };
       const ctx: Ctx = { actor: who.actor, db, now, requestId: ids.requestId };
       const args = await argsOf(request, context, options);

@@ -8,6 +8,7 @@ import { sweepSessions } from "@/lib/auth/sessions";
 import type { Drawing } from "@/lib/drawing/schema";
 import { environment } from "@/lib/env";
 import { logger } from "@/lib/logger";
+import { keepSendingLetters } from "@/lib/mail/send-letters";
 import { computePool } from "@/lib/services/compute/pool";
 import { startJobs } from "@/lib/services/delivery/run-jobs";
 
@@ -72,4 +73,5 @@ export const startUp = async (): Promise<void> => {
     void sweep(db).catch((error: unknown) => logger().warn({ err: String(error) }, "sweeping failed"));
   sweepQuietly();
   setInterval(sweepQuietly, SWEEP_EVERY_MS).unref();
+  keepSendingLetters(db);
 };

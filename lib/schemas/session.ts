@@ -60,3 +60,6 @@ export const SessionItem = z.strictObject({
   current: z.boolean(),
 });
 export type SessionItem = z.infer<typeof SessionItem>;
+
+export const SessionList = z.strictObject({ items: z.array(SessionItem) });
+export type SessionList = z.infer<typeof SessionList>;

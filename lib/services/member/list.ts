@@ -1,7 +1,8 @@
 import "server-only";
-import { and, asc, count, eq, gt } from "drizzle-orm";
+import { and, asc, count, eq, gt, isNull } from "drizzle-orm";
 import { memberships } from "@/db/schema/memberships";
 import { sessions } from "@/db/schema/sessions";
+import { tokens } from "@/db/schema/tokens";
 import { users } from "@/db/schema/users";
 import { mayAtAll } from "@/lib/permissions";
 import type { MemberList } from "@/lib/schemas/member";
@@ -35,6 +36,14 @@ export const listMembers = async ({ ctx }: { ctx: Ctx }): Promise<MemberList> =>
     )
     .groupBy(sessions.userId);
   const openOf = new Map(open.map((row) => [row.userId, row.sessions]));
+  const held = await ctx.db.read
+    .select({ memberId: tokens.membershipId, tokens: count() })
+    .from(tokens)
+    .where(
+      and(eq(tokens.organisationId, organisationId), isNull(tokens.revokedAt), gt(tokens.expiresAt, ctx.now)),
+    )
+    .groupBy(tokens.membershipId);
+  const tokensOf = new Map(held.map((row) => [row.memberId, row.tokens]));
   const grants = await grantsOf(ctx.db.read, ctx);
   return {
     items: rows.map((row) => ({
@@ -43,7 +52,7 @@ export const listMembers = async ({ ctx }: { ctx: Ctx }): Promise<MemberList> =>
       lastSeenAt: isoOrNull(row.lastSeenAt),
       createdAt: iso(row.createdAt),
       openSessions: openOf.get(row.userId) ?? 0,
-      tokens: 0,
+      tokens: tokensOf.get(row.id) ?? 0,
       grants: grantsFor(grants, row.id),
     })),
   };
