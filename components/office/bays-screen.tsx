@@ -4,6 +4,7 @@ import { useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
 import { BayRow } from "@/components/office/bay-row";
 import { officeKeys } from "@/components/office/office-keys";
 import { OfficeNav, type OfficePage } from "@/components/office/office-nav";
+import { ScrollAcross } from "@/components/office/scroll-across";
 import { Sheet } from "@/components/sheet/sheet";
 import { ActionCell, Cell, TitleBlock } from "@/components/sheet/title-block";
 import { Button } from "@/components/ui/button";
@@ -89,7 +90,7 @@ export function BaysScreen({ pages, firm, bays: initial }: BaysScreenProps) {
           Shapes stand in bays; rights can differ from bay to bay.
         </EmptyBay>
       ) : (
-        <div className="overflow-x-auto">
+        <ScrollAcross label="Bays">
           <Table>
             <caption className="sr-only">Bays in their order</caption>
             <thead>
@@ -119,7 +120,7 @@ export function BaysScreen({ pages, firm, bays: initial }: BaysScreenProps) {
               ))}
             </tbody>
           </Table>
-        </div>
+        </ScrollAcross>
       )}
       <Dialog
         open={adding}

@@ -5,6 +5,7 @@ import { DEED_CHOICES } from "@/components/office/deed-words";
 import { LogTable } from "@/components/office/log-table";
 import { officeKeys } from "@/components/office/office-keys";
 import { OfficeNav, type OfficePage } from "@/components/office/office-nav";
+import { ScrollAcross } from "@/components/office/scroll-across";
 import { Sheet } from "@/components/sheet/sheet";
 import { Cell, TitleBlock } from "@/components/sheet/title-block";
 import { Button } from "@/components/ui/button";
@@ -109,9 +110,9 @@ export function LogScreen({ pages, people }: LogScreenProps) {
         </EmptyBay>
       )}
       {entries.length > 0 && (
-        <div className="overflow-x-auto">
+        <ScrollAcross label="Deeds">
           <LogTable entries={entries} show="both" headed />
-        </div>
+        </ScrollAcross>
       )}
       {query.hasNextPage && (
         <div className="p-3">

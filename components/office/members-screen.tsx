@@ -9,6 +9,7 @@ import { Moment } from "@/components/office/moments";
 import { officeKeys } from "@/components/office/office-keys";
 import { OfficeNav, type OfficePage } from "@/components/office/office-nav";
 import { useMemberChanges } from "@/components/office/use-member-changes";
+import { ScrollAcross } from "@/components/office/scroll-across";
 import { Sheet } from "@/components/sheet/sheet";
 import { Cell, TitleBlock } from "@/components/sheet/title-block";
 import { Notice } from "@/components/ui/notice";
@@ -115,7 +116,7 @@ export function MembersScreen(props: MembersScreenProps) {
               {sentenceOf(failure)}
             </Notice>
           )}
-          <div className="overflow-x-auto">
+          <ScrollAcross label="Members and rights">
             <MemberMatrix
               members={shown}
               bays={bays}
@@ -126,7 +127,7 @@ export function MembersScreen(props: MembersScreenProps) {
               onWish={(member, wish) => right.mutate({ member, wish })}
             />
             {shown.length === 0 && <p className="p-3.5 text-ink-2">No member fits “{q}”.</p>}
-          </div>
+          </ScrollAcross>
           <PaneHead className="border-t">
             <h2>Log</h2>
             <span className="text-note font-regular text-ink-3">every change, for good</span>
@@ -134,9 +135,9 @@ export function MembersScreen(props: MembersScreenProps) {
               whole log
             </Link>
           </PaneHead>
-          <div className="overflow-x-auto">
+          <ScrollAcross label="Newest deeds">
             <LogTable entries={log.items} show="both" />
-          </div>
+          </ScrollAcross>
         </div>
         {inHand && (
           <MemberPane

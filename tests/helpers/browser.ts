@@ -3,13 +3,10 @@ import { join } from "node:path";
 import { AxeBuilder } from "@axe-core/playwright";
 import type { Browser, BrowserContext, Page } from "playwright-core";
 import { afterAll, afterEach, beforeAll, expect } from "vitest";
+import { DEMO_PASSWORD, type DemoAccount } from "@/tests/helpers/demo-accounts";
 import { launchChromium } from "@/tests/helpers/chromium";
 import { startServer, type BuiltServer, type ServerOptions } from "@/tests/helpers/server";
 import { ROOT } from "@/tests/helpers/source-files";
-
-export const DEMO_PASSWORD = "flitchbook-demo";
-
-export type DemoAccount = "admin" | "librarian" | "engineer" | "designer";
 
 export type Person = Readonly<{
   page: Page;

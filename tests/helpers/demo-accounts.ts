@@ -1,0 +1,3 @@
+export const DEMO_PASSWORD = "flitchbook-demo";
+
+export type DemoAccount = "admin" | "librarian" | "engineer" | "designer";
