@@ -1,64 +1,26 @@
 "use client";
-import { Popover } from "@/components/ui/popover";
-import { Button } from "@/components/ui/button";
+import dynamic from "next/dynamic";
+import { useState, type ComponentProps } from "react";
 import type { FilterBarProps } from "@/components/rack/filter-bar";
-import { FAMILIES, FAMILY_NAME } from "@/components/rack/family-names";
 import { MORE_RANGES } from "@/components/rack/ranges";
-import { RangeField } from "@/components/rack/range-field";
-import { TextFilter } from "@/components/rack/text-filter";
-import { Checkbox } from "@/components/ui/choice";
+import type { RackSearch } from "@/components/rack/search-params";
+import { Button } from "@/components/ui/button";
 
-/** Every other range, text, and several families at once. */
-export function MoreFilters({ search, counts, onChange }: FilterBarProps) {
+/** The rest of the filter, fetched at the first press; the trigger says how much of it is set. */
+export function MoreFilters(props: FilterBarProps) {
+  const [wanted, setWanted] = useState(false);
+  if (!wanted)
+    return <MoreButton search={props.search} aria-haspopup="dialog" onClick={() => setWanted(true)} />;
+  return <MoreFiltersPopover {...props} />;
+}
+
+const MoreFiltersPopover = dynamic(() => import("@/components/rack/more-filters-popover"), { ssr: false });
+
+export function MoreButton({ search, ...rest }: ComponentProps<"button"> & { search: RackSearch }) {
   const set = MORE_RANGES.filter((name) => search[name] !== null).length + (search.tag ? 1 : 0);
-  const families = search.family ?? [];
   return (
-    <Popover
-      label="More of the filter"
-      align="end"
-      className="w-[620px]"
-      trigger={
-        <Button size="small" kind={set > 0 ? "danger" : "plain"}>
-          {set > 0 ? `More, ${set} set` : "More"}
-        </Button>
-      }
-    >
-      <div className="grid grid-cols-3 gap-x-4 gap-y-2 max-md:grid-cols-2">
-        {MORE_RANGES.map((name) => (
-          <RangeField
-            key={name}
-            name={name}
-            value={search[name]}
-            onCommit={(value) => onChange({ [name]: value })}
-          />
-        ))}
-        <TextFilter
-          label="Designation or title"
-          value={search.q}
-          onCommit={(q) => onChange({ q })}
-          placeholder="any"
-        />
-        <TextFilter label="Job" value={search.job} onCommit={(job) => onChange({ job })} placeholder="any" />
-        <TextFilter label="Tag" value={search.tag} onCommit={(tag) => onChange({ tag })} placeholder="any" />
-      </div>
-      <fieldset className="mt-3 border-t border-rule pt-2">
-        <legend className="text-micro text-ink-2">Families</legend>
-        <div className="grid grid-cols-3 gap-x-4 max-md:grid-cols-2">
-          {FAMILIES.filter((f) => families.includes(f) || !counts || (counts.byFamily[f] ?? 0) > 0).map(
-            (f) => (
-              <Checkbox
-                key={f}
-                label={FAMILY_NAME[f]}
-                checked={families.includes(f)}
-                onChange={(on) => {
-                  const next = on ? [...families, f] : families.filter((other) => other !== f);
-                  onChange({ family: next.length > 0 ? next : null });
-                }}
-              />
-            ),
-          )}
-        </div>
-      </fieldset>
-    </Popover>
+    <Button size="small" kind={set > 0 ? "danger" : "plain"} {...rest}>
+      {set > 0 ? `More, ${set} set` : "More"}
+    </Button>
   );
 }

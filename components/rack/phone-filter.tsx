@@ -1,19 +1,17 @@
 "use client";
+import dynamic from "next/dynamic";
 import { useState } from "react";
 import { useDisplay } from "@/components/display/display-provider";
 import { Count, Quantity } from "@/components/display/quantity";
 import type { FilterBarProps } from "@/components/rack/filter-bar";
 import { FAMILY_NAME } from "@/components/rack/family-names";
 import { RANGE, RANGE_NAMES } from "@/components/rack/ranges";
-import { RangeField, rangeWords } from "@/components/rack/range-field";
-import { CLEARED, FINDABLE_STATES, isNarrowed } from "@/components/rack/search-params";
-import { TextFilter } from "@/components/rack/text-filter";
+import { rangeWords } from "@/components/rack/range-field";
 import { Button } from "@/components/ui/button";
-import { Dialog } from "@/components/ui/dialog";
-import { SelectField } from "@/components/ui/select";
-import type { ShapeFamily } from "@/lib/schemas/shape";
 
-/** What the filter asks in one line, and the filter itself as a full sheet. */
+const PhoneFilterDialog = dynamic(() => import("@/components/rack/phone-filter-dialog"), { ssr: false });
+
+/** What the filter asks in one line; the filter itself opens as a full sheet. */
 export function PhoneFilter({ search, counts, onChange }: FilterBarProps) {
   const { settings } = useDisplay();
   const [open, setOpen] = useState(false);
@@ -51,62 +49,14 @@ export function PhoneFilter({ search, counts, onChange }: FilterBarProps) {
       <Button kind="plain" className="h-auto border-l border-rule px-4" onClick={() => setOpen(true)}>
         Filter
       </Button>
-      <Dialog
-        open={open}
-        onOpenChange={setOpen}
-        title="Filter"
-        width="sheet"
-        actions={
-          <>
-            <Button kind="main" onClick={() => setOpen(false)}>
-              Show {counts?.total ?? ""}
-            </Button>
-            {isNarrowed(search) && <Button onClick={() => onChange(CLEARED)}>Clear</Button>}
-          </>
-        }
-      >
-        <div className="grid grid-cols-2 gap-3">
-          <TextFilter
-            label="Designation or title"
-            value={search.q}
-            onCommit={(q) => onChange({ q })}
-            placeholder="any"
-            className="col-span-2"
-          />
-          {RANGE_NAMES.map((name) => (
-            <RangeField
-              key={name}
-              name={name}
-              value={search[name]}
-              onCommit={(value) => onChange({ [name]: value })}
-            />
-          ))}
-          <SelectField<ShapeFamily | "">
-            label="Family"
-            value={search.family?.[0] ?? ""}
-            choices={[
-              { value: "", label: "any" },
-              ...Object.entries(FAMILY_NAME).map(([value, label]) => ({
-                value: value as ShapeFamily,
-                label,
-              })),
-            ]}
-            onChange={(family) => onChange({ family: family === "" ? null : [family] })}
-          />
-          <SelectField
-            label="State"
-            value={search.state?.[0] ?? "released"}
-            choices={FINDABLE_STATES.map((value) => ({ value, label: value }))}
-            onChange={(state) => onChange({ state: state === "released" ? null : [state] })}
-          />
-          <TextFilter
-            label="Job"
-            value={search.job}
-            onCommit={(job) => onChange({ job })}
-            placeholder="any"
-          />
-        </div>
-      </Dialog>
+      {open && (
+        <PhoneFilterDialog
+          search={search}
+          counts={counts}
+          onChange={onChange}
+          onClose={() => setOpen(false)}
+        />
+      )}
     </div>
   );
 }

@@ -2,12 +2,12 @@
 import Link from "next/link";
 import { useDisplay } from "@/components/display/display-provider";
 import { Count, UnitOf } from "@/components/display/quantity";
-import { readSort, SORT_NAME, sortWords } from "@/components/rack/sort-names";
+import { readSort, SORT_NAME } from "@/components/rack/sort-names";
 import { ActionCell, Cell, TitleBlock } from "@/components/sheet/title-block";
-import { Button, buttonClass } from "@/components/ui/button";
+import { buttonClass } from "@/components/ui/button";
 import { Kbd } from "@/components/ui/marks";
-import { Menu, MenuChoice } from "@/components/ui/menu";
-import { Arrow, ChevronSign } from "@/components/ui/signs";
+import { Select } from "@/components/ui/select";
+import { Arrow } from "@/components/ui/signs";
 import { apiUrl } from "@/lib/client/api";
 import type { FinderRow } from "@/lib/schemas/find-shapes";
 
@@ -43,20 +43,13 @@ export function RackTitleBlock(props: RackTitleBlockProps) {
         The Rack
       </Cell>
       <Cell label="Order" stays="md">
-        <Menu
-          trigger={
-            <button type="button" className="flex items-center gap-1.5 hover:underline">
-              {sortWords(sort)} <ChevronSign />
-            </button>
-          }
-        >
-          <MenuChoice
-            label="Order"
-            value={nowValue}
-            onChange={onSort}
-            choices={ORDERS.filter((o) => OFTEN.has(o.value) || o.value === nowValue)}
-          />
-        </Menu>
+        <Select
+          aria-label="Order"
+          value={nowValue}
+          onChange={onSort}
+          choices={ORDERS.filter((o) => OFTEN.has(o.value) || o.value === nowValue)}
+          className="-ml-1.5 h-5! w-[190px] border-transparent bg-transparent"
+        />
       </Cell>
       <Cell label="Rows" className="max-sm:hidden">
         {total === null ? (
@@ -95,16 +88,25 @@ export function RackTitleBlock(props: RackTitleBlockProps) {
       </Cell>
       <span className="min-w-0 flex-1 xl:hidden" />
       <ActionCell>
-        <Menu
-          align="end"
-          trigger={
-            <Button kind="plain" className="px-[18px]" disabled={total === 0}>
-              Export <ChevronSign />
-            </Button>
-          }
-        >
-          <ExportLinks query={query} />
-        </Menu>
+        {total !== 0 && (
+          <>
+            <a
+              className={`${buttonClass({ kind: "plain" })} px-[18px] max-sm:hidden`}
+              href={apiUrl("/shapes/export.csv", query)}
+              title="all hits, full precision, in the units they are stored in"
+              download
+            >
+              Export CSV
+            </a>
+            <a
+              className={`${buttonClass({ kind: "plain" })} px-3 max-md:hidden`}
+              href={apiUrl("/shapes/export.json", query)}
+              download
+            >
+              JSON
+            </a>
+          </>
+        )}
         {mayDraft && (
           <Link href="/bench" className={`${buttonClass({ kind: "main" })} px-[18px] max-sm:hidden`}>
             New shape on the Bench
@@ -114,20 +116,3 @@ export function RackTitleBlock(props: RackTitleBlockProps) {
     </TitleBlock>
   );
 }
-
-/** All hits of the search, streamed by the server: full precision, in the units it stores. */
-const ExportLinks = ({ query }: { query: Readonly<Record<string, string>> }) => (
-  <div className="px-3 py-1">
-    <p className="text-micro text-ink-2">All hits, full precision</p>
-    <a className="link block py-1" href={apiUrl("/shapes/export.csv", query)} download>
-      CSV, for spreadsheets and Goods-in
-    </a>
-    <a className="link block py-1" href={apiUrl("/shapes/export.json", query)} download>
-      JSON, for programs
-    </a>
-    <p className="max-w-60 pt-1 text-note text-ink-3">
-      Not checked: buckling, web bearing, connections, fatigue, fire, corrosion, the code’s factors. Local
-      codes and a licensed engineer decide.
-    </p>
-  </div>
-);

@@ -2,34 +2,20 @@
 import { useTheme } from "next-themes";
 import { useState } from "react";
 import { useSignOut } from "@/lib/client/session";
+import { PersonFace } from "@/components/sheet/person-face";
 import { useDisplay } from "@/components/display/display-provider";
 import { Menu, MenuChoice, MenuItem, MenuRule } from "@/components/ui/menu";
-import { ChevronSign } from "@/components/ui/signs";
 
-type PersonMenuProps = Readonly<{ name: string; role: string }>;
+export type PersonMenuProps = Readonly<{ name: string; role: string }>;
 
 /** Who is here; units, notation, theme, keys; sign out. */
-export function PersonMenu({ name, role }: PersonMenuProps) {
+export default function PersonMenu({ name, role }: PersonMenuProps) {
   const { theme, setTheme } = useTheme();
   const { settings, singleKeys, change, notKept, changeSingleKeys } = useDisplay();
   const signOut = useSignOut();
   const [refused, setRefused] = useState<string | null>(null);
   return (
-    <Menu
-      align="end"
-      trigger={
-        <button
-          type="button"
-          className="flex h-7 items-center gap-1.5 px-1 text-table whitespace-nowrap text-ink-2 hover:text-ink max-md:h-11"
-        >
-          <span>
-            <b className="font-[560] text-ink">{name}</b>
-            <span className="max-sm:hidden">, {role}</span>
-          </span>
-          <ChevronSign />
-        </button>
-      }
-    >
+    <Menu align="end" defaultOpen trigger={<PersonFace name={name} role={role} />}>
       <MenuChoice
         label="Units"
         value={settings.system}

@@ -1,8 +1,7 @@
 "use client";
 import { useQueryClient } from "@tanstack/react-query";
+import dynamic from "next/dynamic";
 import { useEffect, useState } from "react";
-import { Button } from "@/components/ui/button";
-import { Dialog } from "@/components/ui/dialog";
 import { ApiProblem } from "@/lib/client/api";
 
 const endsSession = (cause: unknown): boolean => cause instanceof ApiProblem && cause.status === 401;
@@ -25,24 +24,7 @@ export function SessionEnded() {
       offMutations();
     };
   }, [client]);
-  const leave = () => {
-    const { pathname, search } = window.location;
-    window.location.assign(`/sign-in?next=${encodeURIComponent(pathname + search)}`);
-  };
-  return (
-    <Dialog
-      open={ended}
-      onOpenChange={setEnded}
-      title="Your session has ended."
-      text="Nothing more is saved until you sign in again. What is on this page stays while you leave it open."
-      actions={
-        <>
-          <Button kind="main" onClick={leave}>
-            Sign in again
-          </Button>
-          <Button onClick={() => setEnded(false)}>Stay here</Button>
-        </>
-      }
-    />
-  );
+  return ended ? <SessionEndedDialog onClose={() => setEnded(false)} /> : null;
 }
+
+const SessionEndedDialog = dynamic(() => import("@/components/sheet/session-ended-dialog"), { ssr: false });

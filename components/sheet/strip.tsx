@@ -2,7 +2,7 @@ import Link from "next/link";
 import { AreaTabs } from "@/components/sheet/area-tabs";
 import { BrandMark } from "@/components/sheet/brand";
 import { FindField } from "@/components/sheet/find-field";
-import { PersonMenu } from "@/components/sheet/person-menu";
+import { Person } from "@/components/sheet/person";
 
 type StripProps = Readonly<{
   firm: string;
@@ -24,7 +24,7 @@ export const Strip = ({ firm, person }: StripProps) => (
     <div className="flex min-w-0 items-center justify-end pr-3 [grid-area:who]">
       <FindField />
       <span className="mr-3 truncate text-table text-ink-2 max-lg:hidden">{firm}</span>
-      <PersonMenu name={person.name} role={person.role} />
+      <Person name={person.name} role={person.role} />
     </div>
   </header>
 );

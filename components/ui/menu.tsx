@@ -4,11 +4,17 @@ import { DropdownMenu as Radix } from "radix-ui";
 import { cx } from "@/components/ui/cx";
 import { Kbd } from "@/components/ui/marks";
 
-type MenuProps = Readonly<{ trigger: ReactNode; children: ReactNode; align?: "start" | "end" }>;
+type MenuProps = Readonly<{
+  trigger: ReactNode;
+  children: ReactNode;
+  align?: "start" | "end";
+  /** Opens at once: for a menu that was fetched by the press on its trigger. */
+  defaultOpen?: boolean;
+}>;
 
-export function Menu({ trigger, children, align = "start" }: MenuProps) {
+export function Menu({ trigger, children, align = "start", defaultOpen = false }: MenuProps) {
   return (
-    <Radix.Root>
+    <Radix.Root defaultOpen={defaultOpen}>
       <Radix.Trigger asChild>{trigger}</Radix.Trigger>
       <Radix.Portal>
         <Radix.Content

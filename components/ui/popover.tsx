@@ -11,6 +11,8 @@ type PopoverProps = Readonly<{
   align?: "start" | "center" | "end";
   open?: boolean;
   onOpenChange?: (open: boolean) => void;
+  /** Opens at once: for a popover that was fetched by the press on its trigger. */
+  defaultOpen?: boolean;
   className?: string;
 }>;
 
@@ -21,10 +23,15 @@ export function Popover({
   align = "start",
   open,
   onOpenChange,
+  defaultOpen = false,
   className,
 }: PopoverProps) {
   return (
-    <Radix.Root {...(open !== undefined && { open })} {...(onOpenChange && { onOpenChange })}>
+    <Radix.Root
+      defaultOpen={defaultOpen}
+      {...(open !== undefined && { open })}
+      {...(onOpenChange && { onOpenChange })}
+    >
       <Radix.Trigger asChild>{trigger}</Radix.Trigger>
       <Radix.Portal>
         <Radix.Content
