@@ -34,4 +34,4 @@ export function countingValue(
 
 /** Change in per cent from one figure to another; null where either is missing or the first is 0. */
 export const percentChange = (from: number | null, to: number | null): number | null =>
-  from === null || to === null || from === 0 ? null : (to / from - 1) * 100;
+  from === null || to === null || from === 0 ? null : ((to - from) / Math.abs(from)) * 100;

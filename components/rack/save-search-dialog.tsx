@@ -35,7 +35,7 @@ export default function SaveSearchDialog({ search, onClose }: SaveSearchDialogPr
       <TextField
         label="Name"
         value={name}
-        maxLength={80}
+        maxLength={60}
         autoFocus
         onChange={(event) => setName(event.target.value)}
         onKeyDown={(event) => event.key === "Enter" && name.trim() && submit()}
