@@ -66,7 +66,7 @@ export default function PartsTable({ drawing }: { drawing: Drawing }) {
   return (
     <>
       <PaneHead className="border-t border-frame">{plates ? "Plates" : "Parts"}</PaneHead>
-      <Table className="[&_td]:h-7 [&_td]:max-md:h-7">
+      <Table className="[&_td]:h-7 [&_td]:px-1.5 [&_td]:max-md:h-7 [&_th]:px-1.5 [&_td:last-child]:pr-2.5 [&_th:last-child]:pr-2.5">
         <thead>
           <tr>
             <Th className="w-10 pl-3">
@@ -91,12 +91,14 @@ export default function PartsTable({ drawing }: { drawing: Drawing }) {
               <Td className="pl-3">
                 <Balloon>{item}</Balloon>
               </Td>
-              <Td className="max-w-[120px] truncate">
+              <Td className="max-w-[104px] truncate">
                 {part.name || (part.shape.kind === "profile" ? FAMILY_NAME[part.shape.family] : part.id)}
                 {part.cutout && <span className="text-ink-3"> cut out</span>}
               </Td>
               <Td numeric>{sizesOf(part, settings)}</Td>
-              <Td>{grade}</Td>
+              <Td className="max-w-[76px] truncate" title={grade}>
+                {grade}
+              </Td>
               <Td numeric>
                 <Quantity property="mass" value={massKgM} />
               </Td>

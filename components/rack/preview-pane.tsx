@@ -3,6 +3,7 @@ import dynamic from "next/dynamic";
 import Link from "next/link";
 import { Quantity, SymbolOf, UnitOf } from "@/components/display/quantity";
 import { UnsymmetricalFactor } from "@/components/rack/shape-columns";
+import { TransformedMark } from "@/components/rack/transformed-mark";
 import { UsedIn } from "@/components/rack/used-in";
 import { Button, buttonClass } from "@/components/ui/button";
 import { Kbd, RevisionMark, StateChip } from "@/components/ui/marks";
@@ -46,6 +47,7 @@ export function PreviewPane({ row, bay, compared, canCompare, onCompare }: Previ
         <RevisionMark letter={row.letter} />
         <StateChip state={row.state} />
         <UnsymmetricalFactor row={row} />
+        <TransformedMark drawing={row.drawing} />
         <span className="flex-1" />
         {bay && (
           <span className="text-note font-regular text-ink-3" title={bay.name}>

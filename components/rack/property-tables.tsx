@@ -75,7 +75,7 @@ const SingleTable = ({ label, children }: { label: string; children: ReactNode }
   <Table aria-label={label} className="table-fixed [&_tr:last-child>*]:border-b-frame">
     <colgroup>
       <col />
-      <col className="w-[58px]" />
+      <col className="w-[46px]" />
       <col className="w-[92px]" />
       <col className="w-[80px]" />
     </colgroup>
@@ -156,8 +156,8 @@ function FromUnderside({
 
 const AXIS_ROWS = [
   ["Second moment of area", "Ix", "Iy"],
-  ["Elastic modulus, top and left", "SxTop", "SyLeft"],
-  ["Elastic modulus, bottom and right", "SxBottom", "SyRight"],
+  ["Elastic modulus, top, left", "SxTop", "SyLeft"],
+  ["Elastic modulus, foot, right", "SxBottom", "SyRight"],
   ["Plastic modulus", "Zx", "Zy"],
   ["Radius of gyration", "rx", "ry"],
 ] as const;
@@ -172,8 +172,8 @@ function AxisTable({ figures }: TablesProps) {
     <Table className="table-fixed [&_tr:last-child>*]:border-b-frame">
       <colgroup>
         <col />
-        <col className="w-[42px]" />
-        <col className="w-[74px]" />
+        <col className="w-[30px]" />
+        <col className="w-[72px]" />
         <col className="w-[62px]" />
         <col className="w-[80px]" />
       </colgroup>
@@ -207,7 +207,7 @@ function AxisTable({ figures }: TablesProps) {
           </tr>
         ))}
         <tr>
-          <Name>Shape factor, plastic over least elastic</Name>
+          <Name>Shape factor, Z over least S</Name>
           <Td className="h-[25px] max-md:h-[25px]" />
           <Td numeric className="h-[25px] max-md:h-[25px]">
             {Zx !== null && <Count value={Zx / Sx} decimals={2} className="font-[640]" />}

@@ -88,6 +88,7 @@ export function RackScreen({ first, firstQuery, bays, mayDraft, mayDeliver }: Ra
       className="flex min-w-0 flex-col overflow-hidden max-md:overflow-auto"
       block={
         <RackTitleBlock
+          phone={phone}
           sort={state.sort}
           onSort={(sort) => change({ sort })}
           rows={rows.length}

@@ -12,6 +12,8 @@ import { apiUrl } from "@/lib/client/api";
 import type { FinderRow } from "@/lib/schemas/find-shapes";
 
 type RackTitleBlockProps = Readonly<{
+  /** On a phone the areas lie at the foot; the block would only take room. */
+  phone: boolean;
   sort: string;
   onSort: (sort: string) => void;
   rows: number;
@@ -30,13 +32,14 @@ const ORDERS = Object.entries(SORT_NAME).flatMap(([column, [rising, falling]]) =
 const OFTEN = new Set(["mass", "-SxPerMass", "-Sx", "-Ix", "depth", "designation", "-jobs"]);
 
 export function RackTitleBlock(props: RackTitleBlockProps) {
-  const { sort, onSort, rows, total, query, compared, rowsKnown, onForget, mayDraft } = props;
+  const { phone, sort, onSort, rows, total, query, compared, rowsKnown, onForget, mayDraft } = props;
   const { settings } = useDisplay();
   const now = readSort(sort);
   const nowValue = now.falling ? `-${now.column}` : now.column;
   const names = compared.map(
     (id) => rowsKnown.find((row) => row.id === id)?.designation ?? "1 not in this list",
   );
+  if (phone) return null;
   return (
     <TitleBlock>
       <Cell label="Sheet" big className="max-sm:hidden">

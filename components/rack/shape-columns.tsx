@@ -6,6 +6,7 @@ import { Count, Quantity, SymbolOf, UnitOf } from "@/components/display/quantity
 import { FAMILY_NAME } from "@/components/rack/family-names";
 import { OverMinimum } from "@/components/rack/over-minimum";
 import { RowSilhouette } from "@/components/rack/silhouette";
+import { TransformedMark } from "@/components/rack/transformed-mark";
 import { RevisionMark } from "@/components/ui/marks";
 import { UnsymmetricalSign } from "@/components/ui/signs";
 import type { FinderRow, SortColumn } from "@/lib/schemas/find-shapes";
@@ -130,6 +131,7 @@ export const shapeColumns = (context: ColumnContext) =>
             {row.original.designation}
           </Link>
           {row.original.unsymmetrical && <UnsymmetricalFactor row={row.original} />}
+          <TransformedMark drawing={row.original.drawing} />
         </>
       ),
     }),

@@ -4,6 +4,7 @@ import { useEffect, useMemo, useRef } from "react";
 import { useDisplay } from "@/components/display/display-provider";
 import { Quantity, SymbolOf, UnitOf } from "@/components/display/quantity";
 import { columnDecimalsOf } from "@/components/rack/column-decimals";
+import { TransformedMark } from "@/components/rack/transformed-mark";
 import { UnsymmetricalFactor } from "@/components/rack/shape-columns";
 import type { ShapeTableProps } from "@/components/rack/shape-table";
 import { commonScale, RowSilhouette } from "@/components/rack/silhouette";
@@ -72,6 +73,7 @@ export function ShapeList({ rows, sort, inHand, onOpen, onNearEnd, more }: Shape
                   <span className="self-end truncate text-[15px] font-[640]">
                     {row.designation} <RevisionMark letter={row.letter} />
                     <UnsymmetricalFactor row={row} />
+                    <TransformedMark drawing={row.drawing} />
                   </span>
                   <span className="self-end text-[17px]">
                     <Quantity
@@ -81,19 +83,24 @@ export function ShapeList({ rows, sort, inHand, onOpen, onNearEnd, more }: Shape
                       className="font-[640]"
                     />
                   </span>
-                  <span className="col-start-2 text-ink-2">
-                    <SymbolOf property="Sx" />{" "}
-                    <Quantity property="Sx" value={row.Sx} decimals={decimals.Sx} className="text-ink" />
-                    {"  "}
-                    <SymbolOf property="Ix" />{" "}
-                    <Quantity property="Ix" value={row.Ix} decimals={decimals.Ix} className="text-ink" />
-                    {"  deep "}
-                    <Quantity
-                      dimension="length"
-                      value={row.depth}
-                      decimals={decimals.depth}
-                      className="text-ink"
-                    />
+                  <span className="col-start-2 flex gap-2.5 overflow-hidden whitespace-nowrap text-ink-2">
+                    <span>
+                      <SymbolOf property="Sx" />{" "}
+                      <Quantity property="Sx" value={row.Sx} decimals={decimals.Sx} className="text-ink" />
+                    </span>
+                    <span>
+                      <SymbolOf property="Ix" />{" "}
+                      <Quantity property="Ix" value={row.Ix} decimals={decimals.Ix} className="text-ink" />
+                    </span>
+                    <span>
+                      deep{" "}
+                      <Quantity
+                        dimension="length"
+                        value={row.depth}
+                        decimals={decimals.depth}
+                        className="text-ink"
+                      />
+                    </span>
                   </span>
                 </button>
               </li>

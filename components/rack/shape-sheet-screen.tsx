@@ -45,7 +45,7 @@ export function ShapeSheetScreen({ initial, revision: asked, firm, me }: ShapeSh
     <Sheet
       heading={`${sheet.designation}, revision ${revision.letter}`}
       zones
-      className="grid grid-cols-[minmax(0,1fr)_412px_356px] max-xl:grid-cols-[minmax(0,1fr)_380px_320px] max-lg:grid-cols-[minmax(0,1fr)_380px] max-md:grid-cols-[minmax(0,1fr)] max-lg:overflow-auto print:grid-cols-[minmax(0,1fr)_300px_250px] print:overflow-visible"
+      className="grid grid-cols-[minmax(0,1fr)_412px_356px] max-xl:grid-cols-[minmax(0,1fr)_380px_320px] max-lg:grid-cols-[minmax(0,1fr)_380px] max-md:grid-cols-[minmax(0,1fr)] max-lg:auto-rows-max max-lg:overflow-auto print:grid-cols-[minmax(0,1fr)_308px_256px] print:overflow-visible"
       block={
         <TitleBlock>
           <Cell label="Firm" className="hidden print:flex">
@@ -100,7 +100,7 @@ export function ShapeSheetScreen({ initial, revision: asked, firm, me }: ShapeSh
           onRefresh={() => void answer.refetch()}
           failed={answer.error}
         />
-        <div className="grid min-h-0 flex-1 max-lg:min-h-[460px]">
+        <div className="grid min-h-0 flex-1 max-lg:min-h-[520px]">
           <SheetFigure
             designation={sheet.designation}
             revision={revision}
@@ -108,7 +108,7 @@ export function ShapeSheetScreen({ initial, revision: asked, firm, me }: ShapeSh
           />
         </div>
       </div>
-      <div className="min-h-0 min-w-0 overflow-y-auto border-l border-frame max-md:border-t max-md:border-l-0 print:overflow-visible print:[zoom:.78]">
+      <div className="min-h-0 min-w-0 overflow-y-auto border-l border-frame max-lg:overflow-visible max-md:border-t max-md:border-l-0 print:overflow-visible print:[zoom:.78]">
         <PaneHead>
           Properties
           <span className="text-note font-regular text-ink-3">
@@ -122,7 +122,7 @@ export function ShapeSheetScreen({ initial, revision: asked, firm, me }: ShapeSh
         <PartsTable drawing={revision.drawing} />
         <MaterialsTable drawing={revision.drawing} />
       </div>
-      <div className="flex min-h-0 min-w-0 flex-col overflow-y-auto border-l border-frame max-lg:col-span-full max-lg:border-t max-lg:border-l-0 print:col-span-1 print:overflow-visible print:[zoom:.78]">
+      <div className="flex min-h-0 min-w-0 flex-col overflow-y-auto border-l border-frame max-lg:col-span-full max-lg:overflow-visible max-lg:border-t max-lg:border-l-0 print:col-span-1 print:overflow-visible print:[zoom:.78]">
         <RevisionList
           shapeId={sheet.id}
           revisions={sheet.revisions}

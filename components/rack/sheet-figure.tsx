@@ -78,7 +78,10 @@ export function SheetFigure({ designation, revision, under }: SheetFigureProps) 
           {across}
         </p>
       )}
-      <div ref={frame} className="absolute inset-0 flex items-center justify-center print:hidden">
+      <div
+        ref={frame}
+        className="absolute inset-x-5 top-[104px] bottom-4 flex items-center justify-center max-md:top-[92px] print:hidden"
+      >
         {size && (
           <ShapeFigure
             drawing={revision.drawing}

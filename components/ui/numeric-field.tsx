@@ -81,7 +81,7 @@ export function NumericField(props: NumericFieldProps) {
 
   const beside = read?.ok && !LOOKS_PLAIN.test(typed ?? "") ? format(read.value) : null;
   return (
-    <span className={cx("inline-flex flex-wrap items-center gap-x-1.5", className)}>
+    <span className={cx("inline-grid grid-cols-[auto_minmax(0,1fr)] items-center gap-x-1.5", className)}>
       <input
         {...ids}
         ref={input}
@@ -114,7 +114,7 @@ export function NumericField(props: NumericFieldProps) {
         {unit}
       </span>
       {refused && (
-        <span role="alert" className="flex basis-full gap-1.5 text-note whitespace-normal text-oxide-ink">
+        <span role="alert" className="col-span-2 flex gap-1.5 text-note whitespace-normal text-oxide-ink">
           <RefusedSign className="mt-px" />
           <span>
             {empty ? "A number is needed here." : read && !read.ok ? read.error.detail : ""}
