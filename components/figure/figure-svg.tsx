@@ -7,6 +7,7 @@ const ink = (role: Ink | null) => (role === null ? "none" : `var(--fb-${role})`)
 const FACES = {
   figure: { fontFamily: "var(--fb-font-num)", fontSize: 12, fontWeight: 460, fontStyle: "normal" },
   axis: { fontFamily: "var(--fb-font-ui)", fontSize: 14, fontWeight: 560, fontStyle: "italic" },
+  ruler: { fontFamily: "var(--fb-font-num)", fontSize: 11, fontWeight: 440, fontStyle: "normal" },
   balloon: { fontFamily: "var(--fb-font-num)", fontSize: 11.5, fontWeight: 560, fontStyle: "normal" },
 } as const;
 
@@ -23,7 +24,7 @@ const StrokeElement = ({ stroke }: { stroke: Stroke }) => {
       />
     );
   const halo =
-    stroke.face === "balloon"
+    stroke.face === "balloon" || stroke.face === "ruler"
       ? {}
       : {
           paintOrder: "stroke",

@@ -26,6 +26,7 @@ const PRINT: Readonly<Record<Ink, string>> = {
 const FONT = {
   figure: `font-family="monospace" font-size="12"`,
   axis: `font-family="sans-serif" font-size="14" font-style="italic"`,
+  ruler: `font-family="monospace" font-size="11"`,
   balloon: `font-family="monospace" font-size="11.5" font-weight="600"`,
 } as const;
 
@@ -48,7 +49,7 @@ const strokeMarkup = (s: Stroke): string => {
   const place =
     s.turnDeg === 0 ? `x="${s.x}" y="${s.y}"` : `transform="translate(${s.x} ${s.y}) rotate(${s.turnDeg})"`;
   const halo =
-    s.face === "balloon"
+    s.face === "balloon" || s.face === "ruler"
       ? ""
       : ` paint-order="stroke" stroke="#ffffff" stroke-width="3.5" stroke-linejoin="round"`;
   return `<text ${place} text-anchor="${s.anchor}" fill="${ink(s.ink)}" ${FONT[s.face]}${halo}>${escapeText(s.text)}</text>`;

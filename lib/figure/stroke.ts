@@ -35,8 +35,8 @@ export type Stroke =
       anchor: "start" | "middle" | "end";
       /** Degrees clockwise on screen; −90 reads from the right. */
       turnDeg: 0 | -90;
-      /** Figure face 12 px, axis letters italic 14 px, balloon numbers 11.5 px bold without halo. */
-      face: "figure" | "axis" | "balloon";
+      /** Figure face 12 px, axis letters italic 14 px; ruler 11 px and balloon numbers 11.5 px stand without halo. */
+      face: "figure" | "axis" | "balloon" | "ruler";
       ink: Ink;
     }>;
 
