@@ -40,7 +40,7 @@ const profile = z.discriminatedUnion("family", [
   profileOf("timber"),
 ]);
 
-const shape = z.discriminatedUnion("kind", [
+export const PartShape = z.discriminatedUnion("kind", [
   z.strictObject({ kind: z.literal("plate"), width: size, height: size }),
   z.strictObject({ kind: z.literal("outline"), outer: ring, holes: z.array(ring).max(500) }),
   z.strictObject({ kind: z.literal("round"), diameter: size, wall: size.optional() }),
@@ -69,7 +69,7 @@ const common = {
   at: point,
   angle: z.number().min(-360).max(360),
   mirror: z.boolean().optional(),
-  shape,
+  shape: PartShape,
   group: id.optional(),
   locked: z.boolean().optional(),
 };
@@ -112,4 +112,4 @@ export type Drawing = z.infer<typeof DrawingV1>;
 export type DrawingPart = Drawing["parts"][number];
 export type DrawingMaterial = Drawing["materials"][number];
 export type DrawingJoint = Drawing["joints"][number];
-export type PartShape = DrawingPart["shape"];
+export type PartShape = z.infer<typeof PartShape>;

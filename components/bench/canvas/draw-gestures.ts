@@ -6,6 +6,7 @@ import { addParts, freeId } from "@/lib/drawing/edit-parts";
 import type { DrawingPart, PartShape } from "@/lib/drawing/schema";
 import { snapPoint } from "@/lib/drawing/snap-point";
 import { MIN_SIZE_MM } from "@/lib/geometry/limits";
+import { orientRing } from "@/lib/geometry/ring";
 import type { Point, Vertex } from "@/lib/geometry/region";
 
 const place = (tools: GestureTools, shape: PartShape, at: Point, name?: string): void => {
@@ -119,7 +120,8 @@ export const outlineGesture = (tools: GestureTools, start: PointerAt, pxPerMm: (
     }
     show(NO_OVERLAY);
     const origin = points[0] ?? { x: 0, y: 0 };
-    const outer = points.map((p) => ({ x: p.x - origin.x, y: p.y - origin.y }));
+    const drawn = points.map((p) => ({ x: p.x - origin.x, y: p.y - origin.y }));
+    const outer = orientRing(drawn, "outer").map(({ x, y }) => ({ x, y }));
     place(tools, { kind: "outline", outer, holes: [] }, origin, "Outline");
     return true;
   };
