@@ -6,6 +6,8 @@ import { regionArea } from "@/lib/geometry/ring";
 import type { Fault, Result } from "@/lib/result";
 import { err, ok } from "@/lib/result";
 import type { SectionProperties } from "@/lib/section/properties";
+import { jointForces, type JointForce } from "@/lib/section/joint-forces";
+import { pickedProperties } from "@/lib/section/picked-parts";
 import type { Section } from "@/lib/section/section";
 import { sectionProperties } from "@/lib/section/section-properties";
 
@@ -21,6 +23,8 @@ export type BenchFigures = Readonly<{
   parts: Readonly<Record<string, PartFigures>>;
   tabulation: Readonly<{ x: Tabulation; y: Tabulation }>;
   slenderness: readonly Slenderness[];
+  /** Shear in each line of contact per unit of shear force. */
+  jointForces: readonly JointForce[];
   /** Without cut-outs; null where the drawing has none. */
   gross: SectionProperties | null;
   /** Of the picked parts alone; null where none or all are picked. */
@@ -52,10 +56,10 @@ export function* benchFigures({ drawing, picked }: BenchRequest): Generator<unde
   const solids = drawing.parts.filter((p) => p.cutout !== true);
   const gross = cutouts.length > 0 ? propertiesOf({ ...drawing, parts: solids }) : null;
   yield;
-  const some = solids.filter((p) => picked.includes(p.id));
+  const some = section.value.parts.map((p) => p.id).filter((id) => picked.includes(id));
   const ofPicked =
-    some.length > 0 && some.length < solids.length
-      ? propertiesOf({ ...drawing, parts: [...some, ...cutouts] })
+    some.length > 0 && some.length < section.value.parts.length
+      ? pickedProperties(section.value, some)
       : null;
   return ok({
     section: section.value,
@@ -68,7 +72,8 @@ export function* benchFigures({ drawing, picked }: BenchRequest): Generator<unde
     ),
     tabulation: { x: x.value, y: y.value },
     slenderness: slendernessOf(drawing, section.value.contacts),
+    jointForces: jointForces(section.value),
     gross,
-    picked: ofPicked,
+    picked: ofPicked?.ok ? ofPicked.value : null,
   });
 }
