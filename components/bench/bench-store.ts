@@ -10,7 +10,7 @@ import type { Drawing } from "@/lib/drawing/schema";
 import type { Fault } from "@/lib/result";
 import type { SectionProperties } from "@/lib/section/properties";
 import type { View } from "@/lib/figure/view";
-import type { RevisionItem } from "@/lib/schemas/shape";
+import type { RevisionItem, RevisionRecord } from "@/lib/schemas/shape";
 
 export type Tool = "select" | "plate" | "round" | "outline" | "hole" | "dimension" | "measure";
 
@@ -23,9 +23,11 @@ export type ShapeLink = Readonly<{
   title: string;
   bayId: string;
   bayName: string;
-  etag: string;
-  revision: Pick<RevisionItem, "ordinal" | "letter" | "state" | "version"> &
-    Readonly<{ edit: boolean; submit: boolean }>;
+  version: number;
+  revision: Pick<RevisionItem, "ordinal" | "letter" | "state" | "version" | "checked"> &
+    Readonly<{ may: RevisionRecord["may"]; properties: SectionProperties }>;
+  /** What the revision holds, to tell whether the sheet differs from it. */
+  drawing: Drawing;
 }>;
 
 export type SaveState =

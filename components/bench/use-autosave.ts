@@ -13,9 +13,13 @@ const AGAIN_AFTER_MS = 4_000;
 
 export const UNNAMED = "Untitled drawing";
 
-type Content = Readonly<{ drawing: BenchState["history"]["now"]; name: string }>;
-const contentOf = (s: BenchState): Content => ({ drawing: s.history.mark ?? s.history.now, name: s.name });
-const same = (a: Content, b: Content) => a.drawing === b.drawing && a.name === b.name;
+type Content = Readonly<{ drawing: BenchState["history"]["now"]; name: string; of: BenchState["of"] }>;
+const contentOf = (s: BenchState): Content => ({
+  drawing: s.history.mark ?? s.history.now,
+  name: s.name,
+  of: s.of,
+});
+const same = (a: Content, b: Content) => a.drawing === b.drawing && a.name === b.name && a.of === b.of;
 
 /**
  * Keeps the drawing: at once in the browser's journal, after a moment of rest on the server. When the server is away, the
@@ -118,11 +122,11 @@ const makeSaver = (store: BenchStore, owner: string, onSaved: () => void) => {
 
 const passing = (cause: unknown) => cause instanceof ApiProblem && (cause.passing || cause.status === 429);
 
-const send = async (s: BenchState, { drawing, name }: Content) => {
-  const body = { name: name.trim() || UNNAMED, drawing };
+const send = async (s: BenchState, { drawing, name, of }: Content) => {
+  const body = { name: name.trim() || UNNAMED, drawing, of };
   const answer = s.savedAs
     ? await api.patch<DrawingRecord>(`/drawings/${s.savedAs.id}`, { body, ifMatch: s.savedAs.etag })
-    : await api.post<DrawingRecord>("/drawings", { body: s.of ? { ...body, of: s.of } : body });
+    : await api.post<DrawingRecord>("/drawings", { body });
   return { id: answer.data.id, etag: answer.etag ?? "", at: answer.data.updatedAt };
 };
 

@@ -15,6 +15,8 @@ export type CreateDrawingInput = z.infer<typeof CreateDrawingInput>;
 export const UpdateDrawingInput = z.strictObject({
   name: plainText(120, 1).optional(),
   drawing: DrawingV1.optional(),
+  /** Links it to the shape it was saved as, or frees it. */
+  of: DrawingOf.nullable().optional(),
 });
 export type UpdateDrawingInput = z.infer<typeof UpdateDrawingInput>;
 

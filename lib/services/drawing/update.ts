@@ -7,6 +7,7 @@ import { type DrawingRecord, UpdateDrawingInput } from "@/lib/schemas/drawing";
 import type { VerbArgs, Versioned } from "../context";
 import { logDeed } from "../log-deed";
 import { parseInput } from "../parse-input";
+import { revisionOf, shapeOf } from "../shape/load-shape";
 import { requireSameVersion } from "../stale";
 import { drawingOf, toRecord } from "./load-drawing";
 import { rememberUses } from "./remember-uses";
@@ -22,15 +23,17 @@ export const updateDrawing = async ({
   { drawingId: string } & Versioned
 >): Promise<DrawingRecord> => {
   mayAtAll(ctx.actor, "drawing.update");
-  const { name, drawing } = parseInput(UpdateDrawingInput, input);
+  const { name, drawing, of } = parseInput(UpdateDrawingInput, input);
   return ctx.db.write(async (tx) => {
     const before = await drawingOf(tx, ctx.actor, drawingId);
     requireSameVersion(before.version, version);
+    if (of) await revisionOf(tx, ctx.actor, await shapeOf(tx, ctx.actor, of.shapeId), of.ordinal);
     await tx
       .update(drawings)
       .set({
         ...(name !== undefined && { name }),
         ...(drawing !== undefined && { drawing: JSON.stringify(drawing) }),
+        ...(of !== undefined && { shapeId: of?.shapeId ?? null, shapeOrdinal: of?.ordinal ?? null }),
         version: version + 1,
         updatedAt: ctx.now,
       })
