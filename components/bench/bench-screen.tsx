@@ -52,18 +52,18 @@ const Work = ({ person }: Pick<BenchScreenProps, "person">) => {
       block={<BenchTitleBlock person={person.name} />}
       className="grid grid-cols-[minmax(0,1fr)_488px] max-xl:grid-cols-[minmax(0,1fr)_452px] max-lg:block"
     >
-      <div className="grid min-h-0 min-w-0 grid-rows-[auto_auto_minmax(180px,1fr)_auto_auto] max-lg:block">
-        <div className="max-sm:hidden">
+      <div className="flex min-h-0 min-w-0 flex-col max-lg:block">
+        <div className="flex-none max-sm:hidden">
           <ToolBar />
         </div>
         <SaveNotices owner={person.id} />
-        <div className="relative min-h-0 overflow-hidden max-lg:h-[500px] max-sm:h-[320px]">
+        <div className="relative min-h-[180px] flex-1 overflow-hidden max-lg:h-[500px] max-sm:h-[320px]">
           <BenchCanvas />
           <div className="max-sm:hidden">
             <FirstUse />
           </div>
         </div>
-        <div className="max-h-[40dvh] overflow-auto border-t border-frame max-lg:max-h-none">
+        <div className="max-h-[40dvh] flex-none overflow-auto border-t border-frame max-lg:max-h-none">
           <PartsTable />
         </div>
         <Advice />

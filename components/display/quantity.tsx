@@ -81,13 +81,22 @@ export function UnitOf({ className, ...which }: Which & Readonly<{ className?: s
   return <UnitText unit={rule.unit} {...(className && { className })} />;
 }
 
+/** Combining macron: the UI face sets it beside the letter, so the bar is drawn. */
+const MACRON = "\u0304";
+
 /** The symbol of a property in the firm's notation: italic letter, lowered index. */
 export function SymbolOf({ property, className }: ByProperty & Readonly<{ className?: string }>) {
   const { settings } = useDisplay();
   const { letter, index } = symbolOf(property, settings.notation);
   return (
     <span className={cx("whitespace-nowrap", className)}>
-      <span className="font-[480] italic">{letter}</span>
+      <span className="font-[480] italic">
+        {letter.endsWith(MACRON) ? (
+          <span className="inline-block border-t border-current leading-none">{letter.slice(0, -1)}</span>
+        ) : (
+          letter
+        )}
+      </span>
       {index && <sub>{index}</sub>}
     </span>
   );

@@ -58,7 +58,9 @@ export const AboutAxes = ({ p }: { p: SectionProperties | null }) => {
       <tbody className="[&_td]:h-6 [&_td]:border-b [&_td]:border-rule [&_td]:px-1.5 [&_td]:whitespace-nowrap max-lg:[&_td]:h-8">
         {ROWS.map(({ name, property, values }) => {
           const found = p ? values(p) : [];
-          const decimals = columnDecimals(found, propertyRule(property, settings.system));
+          const rule = propertyRule(property, settings.system);
+          // A place near 0 is rounding: it must not give the column more decimals.
+          const decimals = property === "pna.y" ? rule.decimals : columnDecimals(found, rule);
           return (
             <tr key={name}>
               <th
