@@ -12,7 +12,7 @@ import type { SectionProperties } from "@/lib/section/properties";
 import type { View } from "@/lib/figure/view";
 import type { RevisionItem, RevisionRecord } from "@/lib/schemas/shape";
 
-export type Tool = "select" | "plate" | "round" | "outline" | "hole" | "dimension" | "measure";
+export type Tool = "select" | "plate" | "round" | "outline" | "hole" | "dimension";
 
 /** What this sheet is on the server: a private drawing, the shape it revises, and the state it was last saved in. */
 export type SavedAs = Readonly<{ id: string; etag: string; at: string }>;

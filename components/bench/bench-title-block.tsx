@@ -2,6 +2,7 @@
 import { useState } from "react";
 import { useBench, useBenchActions, type SaveState, type ShapeLink } from "@/components/bench/bench-store";
 import { differsFrom, useRackDeeds } from "@/components/bench/rack-deeds";
+import { FileMenu } from "@/components/bench/file-menu";
 import { RevisionDialog, SaveDialog } from "@/components/bench/save-dialog";
 import { useDisplay } from "@/components/display/display-provider";
 import { ActionCell, Cell, TitleBlock } from "@/components/sheet/title-block";
@@ -91,6 +92,7 @@ export const BenchTitleBlock = ({ person }: { person: string }) => {
         </span>
       </Cell>
       <ActionCell>
+        <FileMenu />
         <Actions shape={shape} />
       </ActionCell>
     </TitleBlock>

@@ -3,8 +3,8 @@ import { useRef, useState } from "react";
 import { useBench, useBenchActions, useBenchContext } from "@/components/bench/bench-store";
 import { DrawingsDialog } from "@/components/bench/drawings-dialog";
 import { drawingFromText, handOver } from "@/components/bench/hand-over";
-import { toolClass } from "@/components/bench/tool-class";
 import { useLengths } from "@/components/bench/use-lengths";
+import { Button } from "@/components/ui/button";
 import { Menu, MenuItem, MenuRule } from "@/components/ui/menu";
 import { pasteClip } from "@/lib/drawing/clip";
 
@@ -26,13 +26,7 @@ export const FileMenu = () => {
   };
   return (
     <>
-      <Menu
-        trigger={
-          <button type="button" className={toolClass(false)}>
-            Drawings
-          </button>
-        }
-      >
+      <Menu align="end" trigger={<Button className="h-auto">Drawings</Button>}>
         <MenuItem onSelect={() => setOpen(true)}>Your drawings…</MenuItem>
         <MenuItem onSelect={() => window.location.assign("/bench")}>New drawing</MenuItem>
         <MenuItem onSelect={() => file.current?.click()}>Bring in a drawing file…</MenuItem>

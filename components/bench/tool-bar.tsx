@@ -2,7 +2,6 @@
 import type { ReactNode } from "react";
 import { AddMenu } from "@/components/bench/add-menu";
 import { ArrangeMenu } from "@/components/bench/arrange-menu";
-import { FileMenu } from "@/components/bench/file-menu";
 import { FromRack } from "@/components/bench/from-rack";
 import { useBench, useBenchActions, type Tool } from "@/components/bench/bench-store";
 import { DimensionIcon, HoleIcon, OutlineIcon, PlateIcon, SelectIcon } from "@/components/bench/tool-icons";
@@ -73,7 +72,6 @@ export const ToolBar = () => {
       <Rule />
       <AddMenu />
       <ArrangeMenu />
-      <FileMenu />
       <Rule />
       <button
         type="button"
@@ -95,7 +93,6 @@ export const ToolBar = () => {
       </button>
       <span className="flex-1" />
       <span className="flex flex-none items-center gap-1.5 pr-2 pl-2 text-table text-ink-2 max-md:hidden">
-        Snap
         <Select
           aria-label="Snap"
           value={chosen}

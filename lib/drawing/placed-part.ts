@@ -1,8 +1,23 @@
 import { shapeRegions } from "@/lib/drawing/part-regions";
 import type { Drawing, DrawingPart } from "@/lib/drawing/schema";
 import { ringBox, type Box } from "@/lib/geometry/arc";
-import type { Region } from "@/lib/geometry/region";
-import { placeRegion } from "@/lib/geometry/ring";
+import type { Point, Region } from "@/lib/geometry/region";
+import { cosSinOfDegrees, placeRegion } from "@/lib/geometry/ring";
+
+/** A point of the part's own axes in drawing axes. */
+export const toPlaced = (part: DrawingPart, p: Point): Point => {
+  const [c, s] = cosSinOfDegrees(part.angle);
+  const x = part.mirror === true ? -p.x : p.x;
+  return { x: part.at.x + c * x - s * p.y, y: part.at.y + s * x + c * p.y };
+};
+
+/** A point of the drawing in the part's own axes: the inverse of `toPlaced`. */
+export const toOwn = (part: DrawingPart, p: Point): Point => {
+  const [c, s] = cosSinOfDegrees(part.angle);
+  const [dx, dy] = [p.x - part.at.x, p.y - part.at.y];
+  const x = c * dx + s * dy;
+  return { x: part.mirror === true ? -x : x, y: c * dy - s * dx };
+};
 
 const placed = new WeakMap<DrawingPart, readonly Region[]>();
 

@@ -7,13 +7,12 @@ export type AxisProperties = Pick<
   "centroid" | "angle" | "I1" | "I2" | "pna" | "shearCentre" | "unsymmetrical"
 >;
 
-const PAST_PX = 82;
 /** Principal axes are drawn only where they differ from x–x or y–y by more than this. */
 const PRINCIPAL_FROM_DEG = 0.1;
 
-/** Axes through the centroid, plastic neutral axis, centroid and shear centre. */
-export const axisItems = (p: AxisProperties, bounds: Box, pxPerMm: number): FigureItem[] => {
-  const past = PAST_PX / pxPerMm;
+/** Axes through the centroid, `pastPx` beyond the material so that their letters clear the dimensions, plastic neutral axis, centroid and shear centre. */
+export const axisItems = (p: AxisProperties, bounds: Box, pxPerMm: number, pastPx: number): FigureItem[] => {
+  const past = pastPx / pxPerMm;
   const { centroid } = p;
   const half = Math.max(centroid.x - bounds.xMin, bounds.xMax - centroid.x) + past;
   const items: FigureItem[] = [

@@ -80,7 +80,9 @@ export const composeFigure = (input: ComposeInput): DisplayList => {
     ...ordered.filter((p) => !p.inHand).map(material),
     ...ordered.filter((p) => p.inHand).map(material),
     ...input.welds,
-    ...(show.axes && properties ? axisItems(properties, bounds, pxPerMm) : []),
+    ...(show.axes && properties
+      ? axisItems(properties, bounds, pxPerMm, Math.max(plan.marginPx.left, plan.marginPx.right) + 6)
+      : []),
     ...plan.items,
     ...(show.balloons ? placeBalloons(parts, pxPerMm, room) : []),
   ];

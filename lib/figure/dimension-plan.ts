@@ -116,7 +116,14 @@ export const planDimensions = (input: Input): DimensionPlan => {
 
   function chain(): void {
     const free = parts.filter((p) => !p.inHand && !p.cutout);
-    const levels = stackLevels(free.length > 0 ? free : parts.filter((p) => !p.cutout), bounds);
+    const ownLevels = stackLevels(free, bounds);
+    const levels =
+      ownLevels.length > 0
+        ? ownLevels
+        : stackLevels(
+            parts.filter((p) => !p.cutout),
+            bounds,
+          );
     if (levels.length < 3) return;
     levels.slice(1).forEach((high, i) => {
       const low = levels[i] ?? high;
@@ -124,7 +131,7 @@ export const planDimensions = (input: Input): DimensionPlan => {
       const fits = (high - low) * pxPerMm >= figureWidthPx(text) + 2;
       const end = i === 0 ? "before" : i === levels.length - 2 ? "after" : null;
       const place = fits ? "middle" : end;
-      const owner = free.find((p) => same(p.box.yMin, low, height) && same(p.box.yMax, high, height));
+      const owner = parts.find((p) => same(p.box.yMin, low, height) && same(p.box.yMax, high, height));
       if (!place) return;
       items.push({
         kind: "dimension",
@@ -135,7 +142,7 @@ export const planDimensions = (input: Input): DimensionPlan => {
         text,
         place,
         slidePx: place === "middle" ? slide("y", low, high, figureWidthPx(text)) : 0,
-        inHand: false,
+        inHand: owner?.inHand ?? false,
         ...(owner ? { part: owner.id } : {}),
       });
       used.y.push({ low, high, across: bounds.xMin, inHand: false });

@@ -3,11 +3,14 @@ import { memo, useEffect, useMemo, useRef, useState, type PointerEvent } from "r
 import { Layer, Shape, Stage } from "react-konva";
 import { useBench, useBenchActions } from "@/components/bench/bench-store";
 import { CanvasFlag } from "@/components/bench/canvas/canvas-flag";
+import { DetailGlass } from "@/components/bench/canvas/detail-glass";
 import { CanvasKey, ScaleBar } from "@/components/bench/canvas/canvas-key";
 import type { PointerAt } from "@/components/bench/canvas/gesture";
 import { handleStrokes, overlayStrokes } from "@/components/bench/canvas/overlay";
+import { outlineHandles } from "@/components/bench/canvas/outline-handles";
 import { handlesOf } from "@/components/bench/canvas/resize-gesture";
 import { gridStrokes, rulerStrokes } from "@/components/bench/canvas/ruler";
+import { ViewButtons } from "@/components/bench/canvas/view-buttons";
 import { useCanvasKeys } from "@/components/bench/canvas/use-canvas-keys";
 import { useColours } from "@/components/bench/canvas/use-colours";
 import { useGestures } from "@/components/bench/canvas/use-gestures";
@@ -17,6 +20,7 @@ import { useLengths } from "@/components/bench/use-lengths";
 import { paintStrokes } from "@/components/figure/figure-konva";
 import { SHOW_ALL } from "@/lib/figure/compose-figure";
 import { drawingFigure } from "@/lib/figure/drawing-figure";
+import type { DisplayList } from "@/lib/figure/display-list";
 import { strokesOf } from "@/lib/figure/strokes";
 import type { Stroke } from "@/lib/figure/stroke";
 import { toDrawing, type View } from "@/lib/figure/view";
@@ -26,7 +30,7 @@ import type { Context } from "konva/lib/Context";
 const NONE: readonly Stroke[] = [];
 const native = (context: Context): CanvasRenderingContext2D => context._context;
 
-const useFigureStrokes = (view: View | null): readonly Stroke[] => {
+const useFigure = (view: View | null): DisplayList | null => {
   const drawing = useBench((s) => s.history.now);
   const picked = useBench((s) => s.picked);
   const hovered = useBench((s) => s.hovered);
@@ -34,8 +38,8 @@ const useFigureStrokes = (view: View | null): readonly Stroke[] => {
   const figures = useBench((s) => s.figures);
   const { formatLength } = useLengths();
   return useMemo(() => {
-    if (!view || drawing.parts.length === 0) return NONE;
-    const list = drawingFigure({
+    if (!view || drawing.parts.length === 0) return null;
+    return drawingFigure({
       drawing,
       picked: new Set(hovered ? [...picked, hovered] : picked),
       contacts: figures?.section.contacts ?? [],
@@ -45,7 +49,6 @@ const useFigureStrokes = (view: View | null): readonly Stroke[] => {
       formatLength,
       show: drawing.parts.length > 40 ? { ...SHOW_ALL, balloons: moving.length === 0 } : SHOW_ALL,
     });
-    return list.items.flatMap((item) => strokesOf(item, view));
   }, [drawing, picked, hovered, moving, figures, view, formatLength]);
 };
 
@@ -64,7 +67,12 @@ export const BenchCanvas = memo(function BenchCanvas() {
   const [pointer, setPointer] = useState<Point | null>(null);
   const panning = useRef<Point | null>(null);
   const space = useCanvasKeys({ fit, zoom, active: gestures.active });
-  const figure = useFigureStrokes(view);
+  const list = useFigure(view);
+  const figure = useMemo(
+    () => (list && view ? list.items.flatMap((item) => strokesOf(item, view)) : NONE),
+    [list, view],
+  );
+  const glass = useBench((s) => s.glass);
 
   useEffect(() => {
     const target = box.current;
@@ -113,60 +121,68 @@ export const BenchCanvas = memo(function BenchCanvas() {
 
   const ready = size && view && colours;
   return (
-    <div
-      ref={box}
-      role="application"
-      tabIndex={0}
-      aria-label="Drawing sheet. The parts table below holds the same parts, every number to be typed."
-      className="absolute inset-0 touch-none overflow-hidden outline-offset-[-2px]"
-      style={{ cursor: tool === "select" ? "default" : "crosshair" }}
-      onPointerDown={onPointerDown}
-      onPointerMove={onPointerMove}
-      onPointerUp={onPointerUp}
-      onPointerCancel={onPointerUp}
-      onPointerLeave={() => {
-        setPointer(null);
-        gestures.leave();
-      }}
-      onDoubleClick={() => act.use("select")}
-    >
-      {ready && (
-        <>
-          <Stage width={size.width} height={size.height} listening={false}>
-            <Layer listening={false}>
-              <Shape
-                listening={false}
-                perfectDrawEnabled={false}
-                sceneFunc={(context) => {
-                  paintStrokes(native(context), gridStrokes(view, size, unitMm), colours);
-                  paintStrokes(native(context), figure, colours);
-                }}
-              />
-            </Layer>
-            <Layer listening={false}>
-              <Shape
-                listening={false}
-                perfectDrawEnabled={false}
-                sceneFunc={(context) => {
-                  const handles = handlesOf(drawing, picked).map((h) => h.at);
-                  paintStrokes(
-                    native(context),
-                    [
-                      ...overlayStrokes(gestures.overlay, view, size),
-                      ...handleStrokes(handles, view),
-                      ...rulerStrokes(view, size, unitMm, pointer),
-                    ],
-                    colours,
-                  );
-                }}
-              />
-            </Layer>
-          </Stage>
-          <ScaleBar view={view} />
-          <CanvasKey />
-          {gestures.overlay.flag && <CanvasFlag flag={gestures.overlay.flag} view={view} size={size} />}
-        </>
-      )}
-    </div>
+    <>
+      <div
+        ref={box}
+        role="application"
+        tabIndex={0}
+        aria-label="Drawing sheet. The parts table below holds the same parts, every number to be typed."
+        className="absolute inset-0 touch-none overflow-hidden outline-offset-[-2px]"
+        style={{ cursor: tool === "select" ? "default" : "crosshair" }}
+        onPointerDown={onPointerDown}
+        onPointerMove={onPointerMove}
+        onPointerUp={onPointerUp}
+        onPointerCancel={onPointerUp}
+        onPointerLeave={() => {
+          setPointer(null);
+          gestures.leave();
+        }}
+        onDoubleClick={() => act.use("select")}
+      >
+        {ready && (
+          <>
+            <Stage width={size.width} height={size.height} listening={false}>
+              <Layer listening={false}>
+                <Shape
+                  listening={false}
+                  perfectDrawEnabled={false}
+                  sceneFunc={(context) => {
+                    paintStrokes(native(context), gridStrokes(view, size, unitMm), colours);
+                    paintStrokes(native(context), figure, colours);
+                  }}
+                />
+              </Layer>
+              <Layer listening={false}>
+                <Shape
+                  listening={false}
+                  perfectDrawEnabled={false}
+                  sceneFunc={(context) => {
+                    const handles = [...handlesOf(drawing, picked), ...outlineHandles(drawing, picked)].map(
+                      (h) => h.at,
+                    );
+                    paintStrokes(
+                      native(context),
+                      [
+                        ...overlayStrokes(gestures.overlay, view, size),
+                        ...handleStrokes(handles, view),
+                        ...rulerStrokes(view, size, unitMm, pointer),
+                      ],
+                      colours,
+                    );
+                  }}
+                />
+              </Layer>
+            </Stage>
+            <ScaleBar view={view} />
+            <CanvasKey />
+            {glass && list && pointer && (
+              <DetailGlass list={list} view={view} pointer={pointer} size={size} colours={colours} />
+            )}
+            {gestures.overlay.flag && <CanvasFlag flag={gestures.overlay.flag} view={view} size={size} />}
+          </>
+        )}
+      </div>
+      <ViewButtons fit={fit} zoom={zoom} />
+    </>
   );
 });

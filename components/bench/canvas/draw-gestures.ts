@@ -2,7 +2,8 @@ import type { Gesture, GestureTools, PointerAt } from "@/components/bench/canvas
 import { boxBetween } from "@/components/bench/canvas/band-gesture";
 import { NO_OVERLAY } from "@/components/bench/canvas/overlay";
 import { partFor } from "@/lib/drawing/add-row";
-import { addParts, freeId } from "@/lib/drawing/edit-parts";
+import { addParts, freeId, moveParts, wholeGroups } from "@/lib/drawing/edit-parts";
+import { partAt } from "@/lib/drawing/pick";
 import type { DrawingPart, PartShape } from "@/lib/drawing/schema";
 import { snapPoint } from "@/lib/drawing/snap-point";
 import { MIN_SIZE_MM } from "@/lib/geometry/limits";
@@ -154,31 +155,69 @@ export const outlineGesture = (tools: GestureTools, start: PointerAt, pxPerMm: (
   };
 };
 
-/** Two points clicked: the distance between them, along and across, until the next click or Escape. */
-export const measureGesture = (tools: GestureTools, start: PointerAt): Gesture => {
+/**
+ * Two points clicked: the distance between them, along and across. After the second click a distance can be typed: the part
+ * under the second point is moved so that it holds, along the longer of the two ways.
+ */
+export const dimensionGesture = (tools: GestureTools, start: PointerAt, reach: () => number): Gesture => {
   const { show, act, formatLength } = tools;
   const from = snapped(tools, start).point;
+  let end: { to: Point; part: string | null } | null = null;
+  let typed = "";
   const tell = (to: Point, words: string) => {
     const [dx, dy] = [to.x - from.x, to.y - from.y];
+    const ask = typed ? `distance ${typed} · Enter sets it` : "type a distance to set it";
     show({
       measure: [from, to],
       flag: {
         at: to,
         head: `${formatLength(Math.hypot(dx, dy))} between the points`,
-        note: `${formatLength(Math.abs(dx))} across, ${formatLength(Math.abs(dy))} up${words ? ` · ${words}` : ""}`,
+        note: `${formatLength(Math.abs(dx))} across, ${formatLength(Math.abs(dy))} up · ${end?.part ? ask : words || "free"}`,
       },
     });
   };
+  const drive = (mm: number): void => {
+    if (!end?.part) return;
+    const [dx, dy] = [end.to.x - from.x, end.to.y - from.y];
+    const by =
+      Math.abs(dx) >= Math.abs(dy)
+        ? { x: Math.sign(dx || 1) * mm - dx, y: 0 }
+        : { x: 0, y: Math.sign(dy || 1) * mm - dy };
+    const { part } = end;
+    act.edit((d) => moveParts(d, wholeGroups(d, [part]), by));
+    act.say(`The distance is ${formatLength(mm)}`);
+  };
   return {
     move: (p) => {
+      if (end) return;
       const hit = snapped(tools, p, [from]);
       tell(hit.point, hit.words);
     },
     up: () => false,
     press: (p) => {
-      const hit = snapped(tools, p, [from]);
-      tell(hit.point, hit.words);
-      act.say(`${formatLength(Math.hypot(hit.point.x - from.x, hit.point.y - from.y))} between the points`);
+      if (end) {
+        show(NO_OVERLAY);
+        return true;
+      }
+      const to = snapped(tools, p, [from]).point;
+      end = { to, part: partAt(act.drawing(), to, reach()) };
+      act.say(`${formatLength(Math.hypot(to.x - from.x, to.y - from.y))} between the points`);
+      tell(to, "");
+      return false;
+    },
+    key: (event) => {
+      if (!end?.part) return false;
+      if (event.key === "Enter" && typed) {
+        const mm = tools.readLength(typed);
+        if (mm === null || mm < 0) return true;
+        drive(mm);
+        show(NO_OVERLAY);
+        return "done";
+      }
+      if (event.key === "Backspace") typed = typed.slice(0, -1);
+      else if (event.key.length === 1 && !event.ctrlKey && !event.metaKey) typed += event.key;
+      else return false;
+      tell(end.to, "");
       return true;
     },
     cancel: () => show(NO_OVERLAY),

@@ -3,7 +3,7 @@ import { useCallback, useEffect, useMemo, useRef, useState } from "react";
 import { useBenchContext } from "@/components/bench/bench-store";
 import { bandGesture } from "@/components/bench/canvas/band-gesture";
 import {
-  measureGesture,
+  dimensionGesture,
   outlineGesture,
   plateGesture,
   roundGesture,
@@ -11,6 +11,7 @@ import {
 import type { Gesture, GestureTools, PointerAt } from "@/components/bench/canvas/gesture";
 import { moveGesture } from "@/components/bench/canvas/move-gesture";
 import { NO_OVERLAY, type Overlay } from "@/components/bench/canvas/overlay";
+import { outlineHandleGesture, outlineHandles } from "@/components/bench/canvas/outline-handles";
 import { handlesOf, resizeGesture } from "@/components/bench/canvas/resize-gesture";
 import { useLengths } from "@/components/bench/use-lengths";
 import { wholeGroups } from "@/lib/drawing/edit-parts";
@@ -62,13 +63,17 @@ export const useGestures = () => {
         case "outline":
           return outlineGesture(tools, p, pxPerMm);
         case "dimension":
-        case "measure":
-          return measureGesture(tools, p);
+          return dimensionGesture(tools, p, () => REACH_PX / 2 / pxPerMm());
         case "select": {
           const handle = handlesOf(history.now, picked).find((h) => {
             const at = toScreen(view, h.at);
             return Math.hypot(at.x - p.screen.x, at.y - p.screen.y) <= HANDLE_PX;
           });
+          const bend = outlineHandles(history.now, picked).find((h) => {
+            const at = toScreen(view, h.at);
+            return Math.hypot(at.x - p.screen.x, at.y - p.screen.y) <= HANDLE_PX;
+          });
+          if (bend && picked[0]) return outlineHandleGesture(tools, picked[0], bend, pxPerMm);
           if (handle && picked[0]) return resizeGesture(tools, picked[0], handle);
           const hit = partAt(history.now, p.at, REACH_PX / 2 / view.pxPerMm);
           if (!hit) return bandGesture(tools, p);

@@ -17,8 +17,9 @@ type Row = Readonly<{
 const ROWS: readonly Row[] = [
   { name: "Second moment of area", property: "I1", values: (p) => [p.Ix, p.Iy, p.I1, p.I2] },
   { name: "Product of inertia", property: "Ixy", values: (p) => [p.Ixy] },
-  { name: "Elastic, top or right", property: "S1", values: (p) => [p.SxTop, p.SyRight, p.S1, p.S2] },
+  { name: "Elastic, top or right", property: "S1", values: (p) => [p.SxTop, p.SyRight] },
   { name: "Elastic, bottom or left", property: "S1", values: (p) => [p.SxBottom, p.SyLeft] },
+  { name: "Elastic, least", property: "S1", values: (p) => [p.Sx, p.Sy, p.S1, p.S2] },
   { name: "Plastic modulus", property: "Z1", values: (p) => [p.Zx, p.Zy, p.Z1, p.Z2] },
   {
     name: "Plastic axis, equal areas",

@@ -118,17 +118,21 @@ export const PartsTable = () => {
       <tfoot>
         <tr>
           <td className="h-7 max-md:h-11" />
-          <td colSpan={wide ? 8 : 5} className="px-2">
+          <td colSpan={has ? (wide ? 8 : 5) : 12} className="px-2">
             <AddRow first={!has} />
           </td>
-          <td className={cx("px-2 text-right font-[640]", stale && "text-ink-3")}>
+          <td className={cx("px-2 text-right font-[640]", stale && "text-ink-3", !has && "hidden")}>
             {has && <Quantity dimension="area" value={totalOf(figures?.parts, "area")} />}
           </td>
-          <td className={cx("px-2 text-right font-[640]", stale && "text-ink-3")}>
+          <td className={cx("px-2 text-right font-[640]", stale && "text-ink-3", !has && "hidden")}>
             {has && <Quantity dimension="linearMass" value={figures?.properties.mass} />}
           </td>
-          <td className="max-lg:hidden" />
-          <td />
+          {has && (
+            <>
+              <td className="max-lg:hidden" />
+              <td />
+            </>
+          )}
         </tr>
       </tfoot>
     </table>
