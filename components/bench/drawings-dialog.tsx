@@ -34,11 +34,7 @@ export const DrawingsDialog = ({ onClose }: { onClose: () => void }) => {
       title="Your drawings"
       text="Private to you until you save one into a bay."
       width="wide"
-      actions={
-        <Button asChild>
-          <a href="/bench">New drawing</a>
-        </Button>
-      }
+      actions={<Button onClick={() => window.location.assign("/bench")}>New drawing</Button>}
     >
       {refused && <Notice kind="lost" head={sentenceOf(refused)} className="mb-2" />}
       {list.isError && <Notice kind="lost" head={sentenceOf(list.error)} className="mb-2" />}

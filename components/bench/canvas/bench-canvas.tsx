@@ -126,6 +126,7 @@ export const BenchCanvas = memo(function BenchCanvas() {
         ref={box}
         role="application"
         tabIndex={0}
+        data-view={view ? `${view.xPx} ${view.yPx} ${view.pxPerMm}` : undefined}
         aria-label="Drawing sheet. The parts table below holds the same parts, every number to be typed."
         className="absolute inset-0 touch-none overflow-hidden outline-offset-[-2px]"
         style={{ cursor: tool === "select" ? "default" : "crosshair" }}

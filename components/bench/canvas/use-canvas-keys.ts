@@ -32,18 +32,6 @@ export const useCanvasKeys = ({ fit, zoom, active }: Keys) => {
   const { singleKeys } = useDisplay();
   const space = useRef(false);
 
-  const onKey = useEffectEvent((event: KeyboardEvent) => {
-    const target = event.target instanceof Element ? event.target : null;
-    if (event.defaultPrevented || target?.closest(TYPES_INTO) || target?.closest(ON_TOP)) return;
-    if (event.type === "keyup") {
-      if (event.key === " ") space.current = false;
-      return;
-    }
-    if (active()) return;
-    const onButton = target?.closest("button, a, summary") !== null && target !== null;
-    if (!event.ctrlKey && !event.metaKey && !event.altKey && used(event, onButton)) event.preventDefault();
-  });
-
   const used = (event: KeyboardEvent, onButton: boolean): boolean => {
     const { picked, grid } = store.getState();
     const arrow = ARROWS[event.key];
@@ -88,6 +76,18 @@ export const useCanvasKeys = ({ fit, zoom, active }: Keys) => {
     act.use(tool);
     return true;
   };
+
+  const onKey = useEffectEvent((event: KeyboardEvent) => {
+    const target = event.target instanceof Element ? event.target : null;
+    if (event.defaultPrevented || target?.closest(TYPES_INTO) || target?.closest(ON_TOP)) return;
+    if (event.type === "keyup") {
+      if (event.key === " ") space.current = false;
+      return;
+    }
+    if (active()) return;
+    const onButton = target?.closest("button, a, summary") !== null && target !== null;
+    if (!event.ctrlKey && !event.metaKey && !event.altKey && used(event, onButton)) event.preventDefault();
+  });
 
   useEffect(() => {
     window.addEventListener("keydown", onKey);
