@@ -25,6 +25,7 @@ export const extremePoint = (
         furthest = s;
         at = to;
       }
+      // An arc that bends into the material reaches no further than its ends.
       if (from?.bulge !== undefined && from.bulge > 0) {
         const point = furthestOnEdge(from, to, direction);
         const onArc = (point.x - origin.x) * dx + (point.y - origin.y) * dy;

@@ -1,5 +1,6 @@
 import { edgeLength } from "@/lib/geometry/arc";
-import { distanceToEdge, pointOnEdge, edgeOf, ringEdges } from "@/lib/geometry/edge";
+import { nearestRegion } from "@/lib/geometry/boundary-distance";
+import { edgeOf, pointOnEdge } from "@/lib/geometry/edge";
 import type { Point, Region } from "@/lib/geometry/region";
 import { TOUCH_MM } from "@/lib/geometry/tolerance";
 import type { ContactLine, Section, SectionPart } from "@/lib/section/section";
@@ -14,23 +15,18 @@ export type Seam = Readonly<{
   width: number;
 }>;
 
-const boundaryDistance = (region: Region, p: Point): number =>
-  Math.min(
-    ...[region.outer, ...region.holes].flatMap((ring) =>
-      ringEdges(ring).map((edge) => distanceToEdge(edge, p)),
-    ),
-  );
-
 const arcEdge = (line: ContactLine) =>
   edgeOf(line.bulge === undefined ? line.from : { ...line.from, bulge: line.bulge }, line.to);
 
 const lineLength = (line: ContactLine): number => edgeLength(arcEdge(line).from, line.to);
 
 const pieceAt = (pieces: readonly Piece[], partId: string, p: Point): number => {
-  const own = pieces.flatMap(({ part }, i) => (part.id === partId ? [i] : []));
-  if (own.length <= 1) return own[0] ?? -1;
-  const distances = own.map((i) => boundaryDistance(pieces[i]?.region ?? { outer: [], holes: [] }, p));
-  return own[distances.indexOf(Math.min(...distances))] ?? -1;
+  const own = pieces.flatMap(({ part, region }, i) => (part.id === partId ? [{ i, region }] : []));
+  const nearest = nearestRegion(
+    own.map(({ region }) => region),
+    p,
+  );
+  return (own.length === 1 ? own[0] : own[nearest])?.i ?? -1;
 };
 
 const meet = (a: Point, b: Point): boolean => Math.hypot(a.x - b.x, a.y - b.y) <= TOUCH_MM;

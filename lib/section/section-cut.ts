@@ -1,6 +1,7 @@
 import { clipToHalfPlane, type CutSegment, type HalfPlane } from "@/lib/geometry/clip-half-plane";
+import { nearestRegion } from "@/lib/geometry/boundary-distance";
 import { ringContains } from "@/lib/geometry/contains";
-import { distanceToEdge, edgeOf, directionAt, pointOnEdge, ringEdges } from "@/lib/geometry/edge";
+import { edgeOf, directionAt, pointOnEdge, ringEdges } from "@/lib/geometry/edge";
 import { addMoments, NO_MOMENTS, regionMoments, type Moments } from "@/lib/geometry/moments";
 import type { Point, Region } from "@/lib/geometry/region";
 import { err, ok, type Fault, type Result } from "@/lib/result";
@@ -75,14 +76,6 @@ const innerPoint = ({ outer }: Region): Point => {
   return { x: p.x - step * d.y, y: p.y + step * d.x };
 };
 
-const boundaryDistance = (region: Region, p: Point): number =>
-  Math.min(...ringEdges(region.outer).map((edge) => distanceToEdge(edge, p)));
-
-const nearest = (pieces: readonly Region[], p: Point): number => {
-  const distances = pieces.map((piece) => boundaryDistance(piece, p));
-  return distances.indexOf(Math.min(...distances));
-};
-
 const pieceOf = (elastic: ElasticValues, m: Moments, segments: readonly CutSegment[]): CutPiece => {
   const flow = (direction: "x" | "y") => {
     const { a, b } = stressGrowth(elastic, direction);
@@ -141,14 +134,14 @@ export const sectionCut = (
     for (const region of cut.value.regions) {
       const inner = innerPoint(region);
       const holder = pieces.findIndex((piece) => ringContains(piece.outer, inner));
-      const at = holder < 0 ? nearest(pieces, inner) : holder;
+      const at = holder < 0 ? nearestRegion(pieces, inner) : holder;
       const m = regionMoments([region], elastic.values.centroid);
       sums[at] = addMoments(sums[at] ?? NO_MOMENTS, m, ratio(part.material));
     }
   }
   const segments = outline.value.segments.map((one) => ({
     one,
-    piece: nearest(pieces, { x: (one.from.x + one.to.x) / 2, y: (one.from.y + one.to.y) / 2 }),
+    piece: nearestRegion(pieces, { x: (one.from.x + one.to.x) / 2, y: (one.from.y + one.to.y) / 2 }),
   }));
   const cut = sums.map((m, i) =>
     pieceOf(

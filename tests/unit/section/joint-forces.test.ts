@@ -139,6 +139,44 @@ test("a part that a cut-out parts in two belongs to both sides with its pieces",
   for (const joint of jointForces(parted)) expect(joint.absent?.code).toBe("section.notConnected");
 });
 
+test("a web parted by a slot and bridged by one plate has a line on each side of it, and the plate is in equilibrium", () => {
+  const drawing = steelDrawing(
+    plate(200, 20, 0, 210),
+    plate(10, 400, 0, 0),
+    plate(200, 20, 0, -210),
+    plate(12, 300, 11, 0),
+  );
+  const bridged = section({
+    ...drawing,
+    parts: [
+      ...drawing.parts,
+      {
+        id: "c1",
+        name: "Slot",
+        cutout: true,
+        at: { x: 0, y: 20 },
+        angle: 0,
+        shape: { kind: "plate", width: 10, height: 40 },
+      },
+    ],
+  });
+  const p = must(sectionProperties(bridged));
+  const seams = jointForces(bridged).filter((j) => j.parts.includes("p4"));
+  expect(seams).toHaveLength(2);
+  expect(seams.map((j) => j.absent)).toEqual([null, null]);
+  // Towards the plate at one seam lies everything else: its pull at both, seen from the plate, is the plate's own flow.
+  const D = p.Ix * p.Iy - p.Ixy ** 2;
+  const [x, y] = [11 - p.centroid.x, -p.centroid.y];
+  const own = (3600 * (p.Iy * y - p.Ixy * x)) / D;
+  const intoPlate = seams.map((j) => (j.parts[1] === "p4" ? 1 : -1) * (j.perVy ?? Number.NaN));
+  expectRel((intoPlate[0] ?? 0) + (intoPlate[1] ?? 0), own, { ...CLOSE, scale: Math.abs(intoPlate[0] ?? 0) });
+  expectRel(
+    seams.reduce((sum, j) => sum + j.width, 0),
+    300 - 40,
+    CLOSE,
+  );
+});
+
 test("parts that do not touch have no joints", () => {
   expect(jointForces(section(steelDrawing(plate(10, 10, 0, 0), plate(10, 10, 50, 0))))).toEqual([]);
 });
