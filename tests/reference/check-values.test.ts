@@ -20,7 +20,7 @@ const isLimit = (row: CheckRow) => row.id === "thintube.shapeFactor";
 const checked = CHECK_ROWS.filter((row) => getterOfRow(row) !== null && drawingOfRow(row) !== null);
 const direct = checked.filter((row) => !isLimit(row));
 
-/** Torsion, warping, shear centre and shear areas: they need the torsion solution. */
+/** Torsion, warping, shear centre (`torsion-values.test.ts`) and what tables give by rules of their own. */
 const TORSION = new Set([
   "It",
   "Iw",
@@ -72,10 +72,10 @@ describe("published and closed-form values", () => {
   });
 });
 
-test("no row is dropped: each is checked here, waits for torsion by name, or is not about a section", () => {
+test("no row is dropped: each is checked here, with the torsion values, or is not about a section", () => {
   const rest = CHECK_ROWS.filter((row) => !checked.includes(row));
-  const waiting = rest.filter((row) => !ELSEWHERE.has(row.shape));
-  expect(waiting.filter((row) => !TORSION.has(row.property)).map((row) => row.id)).toEqual([]);
+  const torsional = rest.filter((row) => !ELSEWHERE.has(row.shape));
+  expect(torsional.filter((row) => !TORSION.has(row.property)).map((row) => row.id)).toEqual([]);
   expect(countBy(checked, (row) => row.property)).toEqual({
     A: 54,
     I: 5,
@@ -118,7 +118,7 @@ test("no row is dropped: each is checked here, waits for torsion by name, or is 
     ys: 5,
     "|Ixy|": 1,
   });
-  expect(countBy(waiting, (row) => row.property)).toEqual({
+  expect(countBy(torsional, (row) => row.property)).toEqual({
     Avz: 9,
     C: 2,
     Ct: 3,
