@@ -1,11 +1,6 @@
 import { expect, test } from "vitest";
-import {
-  browserSuite,
-  DEMO_PASSWORD,
-  expectAccessible,
-  expectNoSidewaysScroll,
-  picture,
-} from "@/tests/helpers/browser";
+import { browserSuite, expectAccessible, expectNoSidewaysScroll, picture } from "@/tests/helpers/browser";
+import { DEMO_PASSWORD } from "@/tests/helpers/demo-accounts";
 
 const { person } = browserSuite();
 
