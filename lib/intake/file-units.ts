@@ -52,34 +52,36 @@ export const unitsOfKind = (kind: UnitKind): readonly FileUnitKey[] =>
 
 const SUPERSCRIPTS: Record<string, string> = { "²": "2", "³": "3", "⁴": "4", "⁵": "5", "⁶": "6", "⁹": "9" };
 
-const SPELLINGS: Record<string, FileUnitKey> = {
-  ...Object.fromEntries(FILE_UNIT_KEYS.map((key) => [key.replace("^", ""), key])),
-  inch: "in",
-  inches: "in",
-  '"': "in",
-  zoll: "in",
-  pouce: "in",
-  kgm: "kg/m",
-  kgperm: "kg/m",
-  "kgm-1": "kg/m",
-  "kg/ml": "kg/m",
-  "kg/lfm": "kg/m",
-  lbft: "lb/ft",
-  "lbs/ft": "lb/ft",
-  "lb/lf": "lb/ft",
-  plf: "lb/ft",
-  "#/ft": "lb/ft",
-  sqin: "in2",
-  cuin: "in3",
-  "cm6/1000": "10^3cm6",
-  "1000cm6": "10^3cm6",
-  "103cm6": "10^3cm6",
-  "109mm6": "10^9mm6",
-  "106mm4": "10^6mm4",
-  "104mm4": "10^4mm4",
-  "103mm3": "10^3mm3",
-  "°": "deg",
-};
+const SPELLINGS = new Map<string, FileUnitKey>(
+  Object.entries<FileUnitKey>({
+    ...Object.fromEntries(FILE_UNIT_KEYS.map((key) => [key.replace("^", ""), key])),
+    inch: "in",
+    inches: "in",
+    '"': "in",
+    zoll: "in",
+    pouce: "in",
+    kgm: "kg/m",
+    kgperm: "kg/m",
+    "kgm-1": "kg/m",
+    "kg/ml": "kg/m",
+    "kg/lfm": "kg/m",
+    lbft: "lb/ft",
+    "lbs/ft": "lb/ft",
+    "lb/lf": "lb/ft",
+    plf: "lb/ft",
+    "#/ft": "lb/ft",
+    sqin: "in2",
+    cuin: "in3",
+    "cm6/1000": "10^3cm6",
+    "1000cm6": "10^3cm6",
+    "103cm6": "10^3cm6",
+    "109mm6": "10^9mm6",
+    "106mm4": "10^6mm4",
+    "104mm4": "10^4mm4",
+    "103mm3": "10^3mm3",
+    "°": "deg",
+  }),
+);
 
 /** "cm⁴", "[in.^4]", "10³ cm⁶", "kg / m": the unit it is, or null. */
 export function readUnit(text: string): FileUnitKey | null {
@@ -88,5 +90,5 @@ export function readUnit(text: string): FileUnitKey | null {
     .replace(/[²³⁴⁵⁶⁹]/g, (c) => SUPERSCRIPTS[c] ?? c)
     .replace(/\*\*/g, "^")
     .replace(/[\s[\](){}^.×x*·_]/g, "");
-  return SPELLINGS[plain] ?? null;
+  return SPELLINGS.get(plain) ?? null;
 }

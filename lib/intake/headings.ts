@@ -63,7 +63,7 @@ const FIELD_WORDS: readonly (readonly [RegExp, FieldKey])[] = [
   ],
   [/^(standard|norm|norme|norma|productstandard|produktnorm|code)$/, "standard"],
   [
-    /^(mass|masse|massa|masa|weight|gewicht|poids|peso|waga|nominalweight|nominalmass|massperm|massperlength|massperunitlength|massemetre|massproMeter|gewichtprometer|linearmass|unitmass|unitweight)$/i,
+    /^(mass|masse|massa|masa|weight|gewicht|poids|peso|waga|nominalweight|nominalmass|massperm|masspermetre|masspermeter|weightpermetre|weightpermeter|massperlength|massperunitlength|massemetre|massproMeter|gewichtprometer|linearmass|unitmass|unitweight)$/i,
     "mass",
   ],
   [
@@ -190,20 +190,22 @@ function upperCaseSymbol(symbol: string, kind: UnitKind | null): Meaning | null 
   };
 }
 
-const KEYS: Record<string, FieldKey> = {
-  legLong: "depth",
-  legShort: "width",
-  flangeWidth: "width",
-  webThickness: "webThickness",
-  flangeThickness: "flangeThickness",
-  rootRadius: "rootRadius",
-  toeRadius: "toeRadius",
-  outerRadius: "outerRadius",
-  innerRadius: "innerRadius",
-  family: "series",
-};
+const KEYS = new Map<string, FieldKey>(
+  Object.entries({
+    legLong: "depth",
+    legShort: "width",
+    flangeWidth: "width",
+    webThickness: "webThickness",
+    flangeThickness: "flangeThickness",
+    rootRadius: "rootRadius",
+    toeRadius: "toeRadius",
+    outerRadius: "outerRadius",
+    innerRadius: "innerRadius",
+    family: "series",
+  } as const),
+);
 
-const exactKey = (name: string): FieldKey | null => KEYS[name.trim()] ?? null;
+const exactKey = (name: string): FieldKey | null => KEYS.get(name.trim()) ?? null;
 
 function axisOf(letter: string): Axis {
   switch (letter.toLowerCase()) {

@@ -45,7 +45,7 @@ export function recogniseFile(
   decoded: DecodedText,
   options: RecogniseOptions = {},
 ): Result<Recognition, FileFault> {
-  const found = findDelimiter(decoded.text, SAMPLE_RECORDS);
+  const found = findDelimiter(decoded.text, SAMPLE_RECORDS, knownHeadings);
   const corrected = options.corrected ?? null;
   if (!found.ok && corrected === null) return found;
   const base = found.ok
@@ -114,13 +114,14 @@ export function recogniseFile(
   });
 }
 
+const knownHeadings = (record: TableRecord): number =>
+  recogniseColumns(record.cells.slice(0, MAX_COLUMNS), null).columns.filter((c) => c.field !== "note").length;
+
 function findHeading(records: readonly TableRecord[]): TableRecord | null {
   let best: TableRecord | null = null;
   let most = 0;
   for (const record of records.slice(0, HEADING_SEARCH)) {
-    const known = recogniseColumns(record.cells.slice(0, MAX_COLUMNS), null).columns.filter(
-      (c) => c.field !== "note",
-    ).length;
+    const known = knownHeadings(record);
     if (known > most) {
       best = record;
       most = known;

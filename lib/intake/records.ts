@@ -145,8 +145,15 @@ export type DelimiterFound = Readonly<{
   skippedLines: number;
 }>;
 
-/** The delimiter that gives the most fields in the most equal number of lines; a first line `sep=;` is believed. */
-export function findDelimiter(text: string, sample: number): Result<DelimiterFound, FileFault> {
+/**
+ * The delimiter that gives the most fields in the most equal number of lines; a first line `sep=;` is believed.
+ * `known` says how many headings a record holds: a delimiter under which headings are recognised goes before a tidier one.
+ */
+export function findDelimiter(
+  text: string,
+  sample: number,
+  known: (record: TableRecord) => number = () => 0,
+): Result<DelimiterFound, FileFault> {
   const stated = /^sep=([;,\t|])\n/.exec(text);
   if (stated !== null) {
     const delimiter = DELIMITERS.find((d) => d === stated[1]) ?? ";";
@@ -159,7 +166,7 @@ export function findDelimiter(text: string, sample: number): Result<DelimiterFou
     });
   }
   const head = text.length > 400_000 ? text.slice(0, text.indexOf("\n", 400_000) + 1 || 400_000) : text;
-  const scored = DELIMITERS.map((delimiter) => ({ delimiter, ...scoreOf(head, delimiter, sample) }));
+  const scored = DELIMITERS.map((delimiter) => ({ delimiter, ...scoreOf(head, delimiter, sample, known) }));
   const best = scored.reduce((a, b) => (b.score > a.score ? b : a));
   if (best.score === 0)
     return err({
@@ -176,8 +183,15 @@ export function findDelimiter(text: string, sample: number): Result<DelimiterFou
   });
 }
 
-function scoreOf(text: string, delimiter: Delimiter, sample: number) {
-  const counts = firstRecords(text, delimiter, sample).map((r) => r.cells.length);
+const HEADING_SEARCH = 20;
+
+function scoreOf(text: string, delimiter: Delimiter, sample: number, known: (record: TableRecord) => number) {
+  const records = firstRecords(text, delimiter, sample);
+  const counts = records.map((r) => r.cells.length);
+  const headings = Math.max(
+    0,
+    ...records.slice(0, HEADING_SEARCH).map((r) => (r.cells.length > 1 ? known(r) : 0)),
+  );
   const tally = new Map<number, number>();
   for (const n of counts) if (n > 1) tally.set(n, (tally.get(n) ?? 0) + 1);
   const [fields, agree] = [...tally.entries()].reduce(
@@ -185,5 +199,10 @@ function scoreOf(text: string, delimiter: Delimiter, sample: number) {
     [1, 0],
   );
   const share = counts.length === 0 ? 0 : agree / counts.length;
-  return { score: fields > 1 ? share * share * Math.sqrt(fields) : 0, fields, agree, lines: counts.length };
+  return {
+    score: fields > 1 ? share * share * Math.sqrt(fields) * (1 + headings) : 0,
+    fields,
+    agree,
+    lines: counts.length,
+  };
 }
