@@ -1,5 +1,6 @@
 import type { PartShape } from "@/lib/drawing/schema";
 import { checkRings } from "@/lib/geometry/check-rings";
+import { MAX_LENGTH_MM, MIN_SIZE_MM } from "@/lib/geometry/limits";
 import type { Region, Ring } from "@/lib/geometry/region";
 import { orientRing } from "@/lib/geometry/ring";
 import { profileRegions } from "@/lib/profiles/profile-regions";
@@ -18,7 +19,19 @@ const circle = (radius: number): Ring => [
   { x: -radius, y: 0, bulge: 1 },
 ];
 
+/** The schema refuses these already; a drawing that was changed in memory comes here without it. */
+const badSize = (sizes: Readonly<Record<string, number | undefined>>): Fault | null => {
+  for (const [field, size] of Object.entries(sizes)) {
+    if (size === undefined || (size >= MIN_SIZE_MM && size <= MAX_LENGTH_MM)) continue;
+    const detail = `The ${field} is ${size}, but must lie between ${MIN_SIZE_MM} and ${MAX_LENGTH_MM} mm. Type it again.`;
+    return { code: "part.badSize", detail, pointer: `/${field}` };
+  }
+  return null;
+};
+
 const roundRegions = (diameter: number, wall: number | undefined): Result<readonly Region[], Fault> => {
+  const bad = badSize({ diameter, wall });
+  if (bad !== null) return err(bad);
   const outer = circle(diameter / 2);
   if (wall === undefined) return ok([{ outer, holes: [] }]);
   if (2 * wall >= diameter)
@@ -53,8 +66,10 @@ const outlineRegions = (outer: Ring, holes: readonly Ring[]): Result<readonly Re
  */
 export const shapeRegions = (shape: PartShape): Result<readonly Region[], readonly Fault[]> => {
   switch (shape.kind) {
-    case "plate":
-      return ok([{ outer: rectangle(shape.width, shape.height), holes: [] }]);
+    case "plate": {
+      const bad = badSize({ width: shape.width, height: shape.height });
+      return bad === null ? ok([{ outer: rectangle(shape.width, shape.height), holes: [] }]) : err([bad]);
+    }
     case "round": {
       const round = roundRegions(shape.diameter, shape.wall);
       return round.ok ? round : err([round.error]);

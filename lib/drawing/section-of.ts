@@ -1,4 +1,5 @@
 import { checkDrawing } from "@/lib/drawing/check-drawing";
+import { jointWarnings } from "@/lib/drawing/check-joints";
 import { shapeRegions } from "@/lib/drawing/part-regions";
 import { resolveMaterial, thicknessOf } from "@/lib/drawing/part-thickness";
 import type { Drawing, DrawingPart } from "@/lib/drawing/schema";
@@ -29,6 +30,18 @@ const placedRegions = (
   index: number,
   origin: Point,
 ): Result<readonly Region[], readonly Fault[]> => {
+  const badPlace = (["x", "y"] as const).find((axis) => !Number.isFinite(part.at[axis]));
+  const misplaced =
+    badPlace === undefined ? (Number.isFinite(part.angle) ? null : "angle") : `at/${badPlace}`;
+  if (misplaced !== null)
+    return err([
+      {
+        code: "part.notFinite",
+        detail: `${nameOf(part)}: its place and angle must be finite numbers. Type them again.`,
+        part: part.id,
+        pointer: `/parts/${index}/${misplaced}`,
+      },
+    ]);
   const regions = shapeRegions(part.shape);
   if (!regions.ok)
     return err(
@@ -167,7 +180,8 @@ export const sectionOf = (drawing: Drawing): Result<Section, readonly Fault[]> =
       "drawing.cutAway",
       "The cut-outs leave nothing that counts for stiffness. Make them smaller.",
     );
-  return ok(sectionFrom(solids, arranged.value, reference.value.material, origin));
+  const section = sectionFrom(solids, arranged.value, reference.value.material, origin);
+  return ok({ ...section, warnings: [...section.warnings, ...jointWarnings(drawing, section.contacts)] });
 };
 
 const atPart = (drawing: Drawing, fault: Fault): Fault => {

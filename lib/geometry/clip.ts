@@ -34,8 +34,12 @@ export const polygonsArea = (polygons: Polygons): number =>
     0,
   );
 
-/** A step that throws or whose areas do not add up is tried again on a coarser grid. */
-const attempt = <T>(once: (step: number) => T | null): Result<Clipped<T>> => {
+/**
+ * Runs a clip on one grid after the other until it gives an answer: a throw, or null for areas that do not add up, is
+ * tried again on the next coarser one.
+ * @returns the answer and its grid, or `clip.failed` with the reason of the last grid.
+ */
+export const onGrids = <T>(once: (step: number) => T | null): Result<Clipped<T>> => {
   let reason = "its areas did not add up";
   for (const stepMm of SNAP_STEPS_MM) {
     try {
@@ -65,7 +69,7 @@ export type Cut = Readonly<{ rest: Polygons; common: Polygons }>;
  * @returns the two pieces, or `clip.failed` when no grid gave an answer that adds up.
  */
 export const cutPolygons = (subject: Polygons, others: readonly Polygons[]): Result<Clipped<Cut>> =>
-  attempt((step) => {
+  onGrids((step) => {
     const a = snapTo(subject, step);
     const [first = [], ...more] = others.map((other) => snapTo(other, step));
     const cover = more.length === 0 ? first : polygonClipping.union(first, ...more);
@@ -82,7 +86,7 @@ export type United = Readonly<{ all: Polygons; both: Polygons }>;
  * @param a b polygons, each without overlap in itself.
  */
 export const unitePolygons = (a: Polygons, b: Polygons): Result<Clipped<United>> =>
-  attempt((step) => {
+  onGrids((step) => {
     const [p, q] = [snapTo(a, step), snapTo(b, step)];
     const all = polygonClipping.union(p, q);
     const both = polygonClipping.intersection(p, q);

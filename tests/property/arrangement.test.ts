@@ -15,10 +15,10 @@ test("|A∪B| + |A∩B| = |A| + |B| for parts thrown together", () => {
     fc.property(assembly(2, 2), ([a, b]) => {
       if (a !== undefined && b !== undefined) addsUp(a, b);
     }),
-    { numRuns: 100, endOnFailure: true },
+    { numRuns: 60, endOnFailure: true },
   );
 });
 
 test("assemblies of up to six parts fill their outline without overlap, in any order", () => {
-  fc.assert(fc.property(assembly(2, 6), fillsItsOutline), { numRuns: 60, endOnFailure: true });
+  fc.assert(fc.property(assembly(2, 6), fillsItsOutline), { numRuns: 25, endOnFailure: true });
 });

@@ -165,4 +165,78 @@ describe("sectionOf", () => {
       ["profile.doesNotFit", "h", "/parts/1/shape/dimensions/thickness"],
     ]);
   });
+
+  test("names what is not finite or has no size even where no schema looked first", () => {
+    expect(
+      faults(
+        drawing([
+          plate("a", Number.NaN, 0, 10, 10),
+          plate("b", 0, 0, 10, 10, { angle: Infinity }),
+          plate("c", 0, 0, 0, 10),
+          plate("d", 0, 0, 10, Number.NaN),
+          plate("e", 0, 0, 1, 1, { shape: { kind: "round", diameter: -3 } }),
+        ]),
+      ),
+    ).toEqual([
+      ["part.notFinite", "a", "/parts/0/at/x"],
+      ["part.notFinite", "b", "/parts/1/angle"],
+      ["part.badSize", "c", "/parts/2/shape/width"],
+      ["part.badSize", "d", "/parts/3/shape/height"],
+      ["part.badSize", "e", "/parts/4/shape/diameter"],
+    ]);
+  });
+
+  test("takes cut-outs away and points at parts of different materials that overlap", () => {
+    const hole: Part = {
+      id: "h",
+      name: "Hole",
+      cutout: true,
+      at: { x: 5, y: 5 },
+      angle: 0,
+      shape: { kind: "round", diameter: 6 },
+    };
+    const section = sectionOk(drawing([hole, plate("p", 0, 0, 100, 40)]));
+    expectRel(regionArea(section.outline[0] ?? { outer: [], holes: [] }), 4000 - 9 * Math.PI, { rel: 1e-14 });
+    expect(section.parts.map(({ id }) => id)).toEqual(["p"]);
+    expect(faults(drawing([plate("p", 5, 5, 2, 2), { ...hole, at: { x: 5, y: 5 } }]))).toEqual([
+      ["drawing.cutAway", undefined, "/parts"],
+    ]);
+    const timber = { ...steel, id: "c24", name: "C24", E: 11_000 };
+    const mixed = drawing([plate("p", 0, 0, 100, 40), plate("t", 0, 20, 50, 40, { material: "c24" })], {
+      materials: [steel, timber],
+    });
+    expect(faults(mixed)).toEqual([["overlap.differentMaterials", "p", "/parts/0"]]);
+  });
+
+  test("contacts, bodies and outline stand in drawing axes", () => {
+    const { contacts, bodies, outline } = sectionOk(
+      drawing([plate("web", 1000, -500, 10, 600), plate("top", 1000, -190, 300, 20)]),
+    );
+    expect(contacts).toEqual([
+      { parts: ["web", "top"], lines: [{ from: { x: 1005, y: -200 }, to: { x: 995, y: -200 } }] },
+    ]);
+    expect(bodies).toEqual([["web", "top"]]);
+    expect(outline[0]?.outer).toContainEqual({ x: 1150, y: -180 });
+  });
+
+  test("says which joints join nothing", () => {
+    const joint = (a: string, b: string, kind: "fillet" | "bolts") => ({
+      between: [a, b] as [string, string],
+      kind,
+      size: 6,
+    });
+    const parts = [plate("a", 0, 0, 100, 10), plate("b", 0, 10, 100, 10), plate("c", 0, 100, 100, 10)];
+    const joints = [
+      joint("b", "a", "fillet"),
+      joint("a", "c", "fillet"),
+      joint("a", "c", "bolts"),
+      joint("a", "x", "bolts"),
+    ];
+    const { warnings } = sectionOk(drawing(parts, { joints }));
+    expect(warnings.map(({ code, parts: named }) => [code, named])).toEqual([
+      ["parts.floating", ["c"]],
+      ["joint.noContact", ["a", "c"]],
+      ["joint.unknownPart", ["a"]],
+    ]);
+  });
 });
