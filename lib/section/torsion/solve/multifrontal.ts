@@ -1,6 +1,7 @@
 import type { Space } from "@/lib/section/torsion/element/space";
 import { unknownsOf } from "@/lib/section/torsion/element/space";
 import type { Pacer } from "@/lib/section/torsion/pacer";
+import { giveBack, makeArena, take, type Arena } from "@/lib/section/torsion/solve/arena";
 import { eliminate } from "@/lib/section/torsion/solve/front";
 import type { BisectionTree } from "@/lib/section/torsion/solve/nested-bisection";
 
@@ -12,14 +13,10 @@ export type ElementSystem = (t: number, matrix: Float64Array, sides: Float64Arra
 /** Loads on single unknowns beside those of the elements. */
 export type PointLoad = Readonly<{ unknown: number; side: number; value: number }>;
 
-type Kept = Readonly<{ unknowns: Int32Array; count: number; size: number; factor: Float64Array }>;
-type Passed = Readonly<{
-  things: Int32Array;
-  unknowns: Int32Array;
-  schur: Float64Array;
-  size: number;
-  rows: number;
-}>;
+/** An eliminated front: its factor's `count` columns stand in the arena from `at`, `size` + sides rows of them. */
+type Kept = Readonly<{ unknowns: Int32Array; count: number; size: number; at: number }>;
+/** What a node leaves to its parent: the Schur complement of `unknowns`, right-hand sides below it, in the arena from `at`. */
+type Passed = Readonly<{ things: readonly number[]; unknowns: Int32Array; at: number }>;
 
 /** First and last place, in the tree's order, of an element that carries a thing. */
 const spans = (space: Space, tree: BisectionTree): Readonly<{ first: Int32Array; last: Int32Array }> => {
@@ -64,20 +61,23 @@ export function* solveMultifrontal(
   const extra = new Map<number, PointLoad[]>();
   for (const load of loads) extra.set(load.unknown, [...(extra.get(load.unknown) ?? []), load]);
   const kept: Kept[] = [];
+  const factors = makeArena();
+  const passedOn = makeArena();
+  const front = makeArena();
   const passed: (Passed | undefined)[] = [];
 
   const gather = (node: number): readonly [number[], number[]] => {
     const [lo, hi] = [tree.low[node]!, tree.high[node]!];
     const [done, open]: [number[], number[]] = [[], []];
-    const take = (thing: number): void => {
+    const note = (thing: number): void => {
       if (thing < 0 || seen[thing] === node) return;
       seen[thing] = node;
       (first[thing]! >= lo && last[thing]! < hi ? done : open).push(thing);
     };
-    for (const child of [tree.left[node]!, tree.right[node]!]) passed[child]?.things.forEach(take);
+    for (const child of [tree.left[node]!, tree.right[node]!]) passed[child]?.things.forEach(note);
     if (tree.left[node]! < 0)
       for (let i = lo; i < hi; i++)
-        for (let k = 7 * tree.order[i]!; k < 7 * tree.order[i]! + 7; k++) take(things[k]!);
+        for (let k = 7 * tree.order[i]!; k < 7 * tree.order[i]! + 7; k++) note(things[k]!);
     return [done, open];
   };
 
@@ -105,20 +105,20 @@ export function* solveMultifrontal(
     }
   };
 
-  const addChild = ({ unknowns, schur, size: own_ }: Passed, a: Float64Array, size: number): void => {
+  const addChild = ({ unknowns, at }: Passed, a: Float64Array, size: number): void => {
     const m = unknowns.length;
+    const schur = passedOn.data;
     for (let i = 0; i < m; i++) {
       const row = place[unknowns[i]!]!;
-      for (let j = 0; j <= i; j++) {
+      for (let j = 0, k = at + i * m; j <= i; j++, k++) {
         const column = place[unknowns[j]!]!;
-        const value = schur[i * own_ + j]!;
-        if (column <= row) a[row * size + column]! += value;
-        else a[column * size + row]! += value;
+        if (column <= row) a[row * size + column]! += schur[k]!;
+        else a[column * size + row]! += schur[k]!;
       }
     }
     for (let side = 0; side < sides; side++)
-      for (let j = 0; j < m; j++)
-        a[(size + side) * size + place[unknowns[j]!]!]! += schur[(m + side) * own_ + j]!;
+      for (let j = 0, k = at + (m + side) * m; j < m; j++, k++)
+        a[(size + side) * size + place[unknowns[j]!]!]! += schur[k]!;
   };
 
   for (let node = 0; node < tree.low.length; node++) {
@@ -127,66 +127,77 @@ export function* solveMultifrontal(
     const unknowns = spread([...done, ...open]);
     const size = unknowns.length;
     const rows = size + sides;
-    const a = new Float64Array(rows * size);
+    giveBack(front, 0);
+    take(front, rows * size);
+    const a = front.data;
+    a.fill(0, 0, rows * size);
     unknowns.forEach((u, i) => {
       place[u] = i;
     });
     const count = done.reduce((sum, thing) => sum + start[thing + 1]! - start[thing]!, 0);
     for (let i = 0; i < count; i++)
       for (const { side, value } of extra.get(unknowns[i]!) ?? []) a[(size + side) * size + i]! += value;
+    let lowest = passedOn.used;
     for (const child of [tree.left[node]!, tree.right[node]!]) {
       const from = passed[child];
       if (from === undefined) continue;
       addChild(from, a, size);
+      lowest = Math.min(lowest, from.at);
       passed[child] = undefined;
     }
+    // Children are the last to have passed anything on: their place is free again.
+    giveBack(passedOn, lowest);
     if (tree.left[node]! < 0)
       for (let i = tree.low[node]!; i < tree.high[node]!; i++) addElement(tree.order[i]!, a, size);
     if (!eliminate({ size, rows, a }, count)) return null;
-    kept.push({ unknowns, count, size, factor: columnsOf(a, rows, size, count) });
-    const rest = size - count;
+    kept.push({ unknowns, count, size, at: copyBlock(a, size, [0, rows], [0, count], factors) });
     passed[node] = {
-      things: Int32Array.from(open),
+      things: open,
       unknowns: unknowns.subarray(count),
-      schur: restOf(a, rows, size, count),
-      size: rest,
-      rows: rest + sides,
+      at: copyBlock(a, size, [count, rows], [count, size], passedOn),
     };
   }
-  return backSubstitute(kept, total, sides);
+  return backSubstitute(kept, factors.data, total, sides);
 }
 
-/** The first `count` columns of a front. */
-const columnsOf = (a: Float64Array, rows: number, size: number, count: number): Float64Array => {
-  const columns = new Float64Array(rows * count);
-  for (let i = 0; i < rows; i++) columns.set(a.subarray(i * size, i * size + count), i * count);
-  return columns;
+/** Copies rows × columns of a front, given as from and to, into an arena; returns where. */
+const copyBlock = (
+  a: Float64Array,
+  size: number,
+  [top, bottom]: readonly [number, number],
+  [left, right]: readonly [number, number],
+  into: Arena,
+): number => {
+  const width = right - left;
+  const at = take(into, (bottom - top) * width);
+  const { data } = into;
+  for (let i = top, k = at; i < bottom; i++)
+    for (let j = i * size + left, end = i * size + right; j < end; j++, k++) data[k] = a[j]!;
+  return at;
 };
 
-/** The Schur complement left in a front, right-hand sides below it. */
-const restOf = (a: Float64Array, rows: number, size: number, count: number): Float64Array => {
-  const rest = size - count;
-  const schur = new Float64Array((rows - count) * rest);
-  for (let i = count; i < rows; i++)
-    schur.set(a.subarray(i * size + count, i * size + size), (i - count) * rest);
-  return schur;
-};
-
-const backSubstitute = (kept: readonly Kept[], total: number, sides: number): readonly Float64Array[] =>
+const backSubstitute = (
+  kept: readonly Kept[],
+  factor: Float64Array,
+  total: number,
+  sides: number,
+): readonly Float64Array[] =>
   Array.from({ length: sides }, (_, side) => {
     const x = new Float64Array(total);
+    const y = new Float64Array(kept.reduce((most, { count }) => Math.max(most, count), 0));
     for (let f = kept.length - 1; f >= 0; f--) {
-      const { unknowns, count, size, factor } = kept[f]!;
-      const y = factor.slice((size + side) * count, (size + side + 1) * count);
+      const { unknowns, count, size, at } = kept[f]!;
+      const own = at + (size + side) * count;
+      for (let i = 0; i < count; i++) y[i] = factor[own + i]!;
       for (let k = count; k < size; k++) {
         const value = x[unknowns[k]!]!;
-        const row = k * count;
+        const row = at + k * count;
         for (let i = 0; i < count; i++) y[i]! -= factor[row + i]! * value;
       }
       for (let i = count - 1; i >= 0; i--) {
-        const value = y[i]! / factor[i * count + i]!;
+        const value = y[i]! / factor[at + i * count + i]!;
         x[unknowns[i]!] = value;
-        const row = i * count;
+        const row = at + i * count;
         for (let k = 0; k < i; k++) y[k]! -= factor[row + k]! * value;
       }
     }
