@@ -7,7 +7,10 @@ import { partFor } from "@/lib/drawing/add-row";
 export type Computed = Readonly<{ request: BenchRequest; answer: BenchAnswer }>;
 
 export type ComputeClient = Readonly<{
-  /** Asks for the figures of a drawing; of several requests only the last one is sure to be answered. */
+  /**
+   * Asks for the figures of a drawing; of several requests only the last one is sure to be answered: with the areas, and
+   * once more with torsion in them when the drawing stands still.
+   */
   ask: (request: BenchRequest) => void;
   stop: () => void;
 }>;
@@ -27,6 +30,8 @@ export const startCompute = (
   let sequence = 0;
   let underWay: { sequence: number; request: BenchRequest; since: number } | null = null;
   let waiting: BenchRequest | null = null;
+  /** Answered with areas; its torsion may follow as a second answer. */
+  let answered: { sequence: number; request: BenchRequest } | null = null;
 
   const send = (request: BenchRequest) => {
     sequence += 1;
@@ -34,8 +39,14 @@ export const startCompute = (
     worker.postMessage({ sequence, request } satisfies ToWorker);
   };
   worker.onmessage = ({ data }: MessageEvent<FromWorker>) => {
+    if (answered !== null && data.sequence === answered.sequence) {
+      if (data.kind === "answer") onComputed({ request: answered.request, answer: data.answer });
+      if (data.kind === "failed") onFailed(data.message);
+      return;
+    }
     if (!underWay || data.sequence !== underWay.sequence) return;
     const { request } = underWay;
+    answered = underWay;
     underWay = null;
     if (data.kind === "answer") onComputed({ request, answer: data.answer });
     if (data.kind === "failed") onFailed(data.message);

@@ -15,10 +15,7 @@ const breathe = (): Promise<void> =>
  * Runs a generator in slices of 8 ms and asks between them whether it is still wanted.
  * @returns its result, or null when it was stopped.
  */
-export async function runInSlices<T>(
-  work: Generator<undefined, T>,
-  wanted: () => boolean,
-): Promise<T | null> {
+export async function runInSlices<T>(work: Generator<void, T>, wanted: () => boolean): Promise<T | null> {
   let until = performance.now() + SLICE_MS;
   for (;;) {
     const step = work.next();

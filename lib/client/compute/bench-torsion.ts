@@ -1,0 +1,12 @@
+import type { BenchFigures } from "@/lib/client/compute/bench-figures";
+import { solveTorsion } from "@/lib/section/torsion/solve-torsion";
+import { withTorsion } from "@/lib/section/with-torsion";
+
+/** Torsion of a drawing that takes longer than this is given up, and the figures say so. */
+const LIMIT_MS = 20_000;
+
+/** The figures with torsion and shear put in: what the Bench shows a moment after the areas. */
+export function* benchTorsion(figures: BenchFigures): Generator<void, BenchFigures> {
+  const torsion = yield* solveTorsion(figures.section, { timeLimitMs: LIMIT_MS });
+  return { ...figures, properties: withTorsion(figures.properties, torsion) };
+}
