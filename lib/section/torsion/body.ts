@@ -4,6 +4,7 @@ import type { MeshRegion } from "@/lib/section/torsion/mesh/boundary-graph";
 import type { BodyMesh } from "@/lib/section/torsion/mesh/build-meshes";
 import type { Corner } from "@/lib/section/torsion/mesh/corners";
 import type { Mesh } from "@/lib/section/torsion/mesh/mesh";
+import { makeArenas, type Arenas } from "@/lib/section/torsion/solve/arena";
 import { nestedBisection, type BisectionTree } from "@/lib/section/torsion/solve/nested-bisection";
 
 /**
@@ -24,6 +25,7 @@ export type Body = Readonly<{
   Ixy: number;
   sorted: SortedElements;
   tree: BisectionTree;
+  arenas: Arenas;
 }>;
 
 /** E-weighted ∫1, ∫x, ∫y, ∫x², ∫xy, ∫y² over the triangles. @source Exact for polygons: midpoints of the edges. */
@@ -69,5 +71,6 @@ export const makeBody = (
     Ixy: xy,
     sorted: sortElements(mesh),
     tree: nestedBisection(mesh.twin),
+    arenas: makeArenas(),
   };
 };

@@ -53,7 +53,7 @@ export function* solveStressFunction(
     side: 0,
     value: 2 * area,
   }));
-  const solved = yield* solveMultifrontal(space, tree, system, 1, loads, pacer);
+  const solved = yield* solveMultifrontal(space, tree, system, 1, loads, pacer, body.arenas);
   const f = solved?.[0];
   return f === undefined ? null : { space, f, Jlower: workOn(body, space, f) };
 }

@@ -43,7 +43,7 @@ export function* solveWarping(body: Body, p: number, pacer: Pacer): Generator<vo
       sides[2 * n + i] = force * fy;
     }
   };
-  const solved = yield* solveMultifrontal(space, tree, system, 3, [], pacer);
+  const solved = yield* solveMultifrontal(space, tree, system, 3, [], pacer, body.arenas);
   if (solved === null) return null;
   const [w, px, py] = solved as [Float64Array, Float64Array, Float64Array];
   return { space, w, px, py };

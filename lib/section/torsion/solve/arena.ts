@@ -6,7 +6,7 @@ export type Arena = { data: Float64Array; used: number };
 
 const FIRST_SIZE = 1 << 14;
 
-export const makeArena = (): Arena => ({ data: new Float64Array(FIRST_SIZE), used: 0 });
+const makeArena = (): Arena => ({ data: new Float64Array(FIRST_SIZE), used: 0 });
 
 /** Takes `length` numbers at the end, not set to zero, and returns the first index. */
 export const take = (arena: Arena, length: number): number => {
@@ -24,3 +24,8 @@ export const take = (arena: Arena, length: number): number => {
 export const giveBack = (arena: Arena, start: number): void => {
   arena.used = start;
 };
+
+/** What the solver works in; one solution after another can use the same. */
+export type Arenas = Readonly<{ front: Arena; passedOn: Arena; factors: Arena }>;
+
+export const makeArenas = (): Arenas => ({ front: makeArena(), passedOn: makeArena(), factors: makeArena() });

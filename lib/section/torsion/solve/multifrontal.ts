@@ -1,7 +1,7 @@
 import type { Space } from "@/lib/section/torsion/element/space";
 import { unknownsOf } from "@/lib/section/torsion/element/space";
 import type { Pacer } from "@/lib/section/torsion/pacer";
-import { giveBack, makeArena, take, type Arena } from "@/lib/section/torsion/solve/arena";
+import { giveBack, take, type Arena, type Arenas } from "@/lib/section/torsion/solve/arena";
 import { eliminate } from "@/lib/section/torsion/solve/front";
 import type { BisectionTree } from "@/lib/section/torsion/solve/nested-bisection";
 
@@ -38,6 +38,7 @@ const spans = (space: Space, tree: BisectionTree): Readonly<{ first: Int32Array;
  * Solves a symmetric positive definite finite-element system for several right-hand sides by the multifrontal Cholesky
  * method over a bisection tree: a node's unknowns are eliminated when all elements that carry them lie below it.
  * @param sides number of right-hand sides.
+ * @param arenas to work in; nothing else may use them until this ends.
  * @returns one vector of unknowns to a side, or null where the matrix is not positive definite.
  * @yields about every 8 ms.
  * @source I. Duff & J. Reid, ACM TOMS 9 (1983).
@@ -49,6 +50,7 @@ export function* solveMultifrontal(
   sides: number,
   loads: readonly PointLoad[],
   pacer: Pacer,
+  arenas: Arenas,
 ): Generator<void, readonly Float64Array[] | null> {
   const { start, things } = space;
   const total = start[start.length - 1]!;
@@ -61,9 +63,9 @@ export function* solveMultifrontal(
   const extra = new Map<number, PointLoad[]>();
   for (const load of loads) extra.set(load.unknown, [...(extra.get(load.unknown) ?? []), load]);
   const kept: Kept[] = [];
-  const factors = makeArena();
-  const passedOn = makeArena();
-  const front = makeArena();
+  const { factors, passedOn, front } = arenas;
+  giveBack(factors, 0);
+  giveBack(passedOn, 0);
   const passed: (Passed | undefined)[] = [];
 
   const gather = (node: number): readonly [number[], number[]] => {
