@@ -1,4 +1,5 @@
 import type { BenchFigures } from "@/lib/client/compute/bench-figures";
+import { jointForcesInCells } from "@/lib/section/joint-forces-in-cells";
 import { solveTorsion } from "@/lib/section/torsion/solve-torsion";
 import { withTorsion } from "@/lib/section/with-torsion";
 
@@ -8,5 +9,11 @@ const LIMIT_MS = 20_000;
 /** The figures with torsion and shear put in: what the Bench shows a moment after the areas. */
 export function* benchTorsion(figures: BenchFigures): Generator<void, BenchFigures> {
   const torsion = yield* solveTorsion(figures.section, { timeLimitMs: LIMIT_MS });
-  return { ...figures, properties: withTorsion(figures.properties, torsion) };
+  return {
+    ...figures,
+    properties: withTorsion(figures.properties, torsion),
+    jointForces: torsion.ok
+      ? jointForcesInCells(figures.jointForces, torsion.value.joints)
+      : figures.jointForces,
+  };
 }
