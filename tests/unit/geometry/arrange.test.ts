@@ -156,6 +156,19 @@ describe("parts that overlap", () => {
   });
 });
 
+test("refuses more overlaps than it can settle in time, with their number", () => {
+  const bars = (upright: boolean) =>
+    Array.from({ length: 75 }, (_, i) =>
+      partOf(`${upright}${i}`, [
+        upright ? put(rectangle(2, 1000), 10 * i, 300) : put(rectangle(1000, 2), 300, 10 * i),
+      ]),
+    );
+  expect(arrange([...bars(true), ...bars(false)], [])).toMatchObject({
+    ok: false,
+    error: [{ code: "arrangement.tooManyOverlaps", detail: expect.stringContaining("5625 pairs") }],
+  });
+});
+
 describe("cut-outs", () => {
   const plate = partOf("plate", [rectangle(200, 100)]);
 
