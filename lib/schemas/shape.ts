@@ -136,6 +136,7 @@ export const ShapeSheet = z.strictObject({
   title: z.string(),
   family: ShapeFamily,
   series: z.string(),
+  tags: z.array(z.string()),
   bay: z.strictObject({ id: Id, name: z.string(), ordinal: z.number().int(), counts: FiguresSource }),
   right: Right,
   releasedOrdinal: z.number().int().nullable(),

@@ -1,10 +1,12 @@
 import "server-only";
 import { and, gte, inArray, lte, sql, type SQL } from "drizzle-orm";
 import { finder } from "@/db/schema/finder";
+import { tags } from "@/db/schema/tags";
 import { takes } from "@/db/schema/takes";
 import { foldForSearch } from "@/lib/schemas/designation";
 import { type FindShapesQuery, RANGES, type RangeName } from "@/lib/schemas/find-shapes";
 import { toStored, type UnitName } from "@/lib/units/conversion";
+import { tagKeyOf } from "../tag/load-tags";
 
 const COLUMNS = {
   Sx: finder.Sx,
@@ -54,7 +56,7 @@ export const rangesOf = (query: FindShapesQuery): SQL[] =>
     return [end === "min" ? gte(COLUMNS[column], value) : lte(COLUMNS[column], value)];
   });
 
-/** Conditions beside ranges, families and bays: text, job. */
+/** Conditions beside ranges, families and bays: text, job, tag. */
 export const wordsOf = (query: FindShapesQuery): SQL[] => {
   const conditions: SQL[] = [];
   const text = query.q === undefined ? "" : foldForSearch(query.q);
@@ -62,6 +64,11 @@ export const wordsOf = (query: FindShapesQuery): SQL[] => {
   if (query.job !== undefined) {
     conditions.push(
       sql`exists (select 1 from ${takes} where ${takes.organisationId} = ${finder.organisationId} and ${takes.jobNumber} = ${query.job} and ${takes.shapeId} = ${finder.shapeId})`,
+    );
+  }
+  if (query.tag !== undefined) {
+    conditions.push(
+      sql`exists (select 1 from ${tags} where ${tags.organisationId} = ${finder.organisationId} and ${tags.tagKey} = ${tagKeyOf(query.tag)} and ${tags.shapeId} = ${finder.shapeId})`,
     );
   }
   return conditions;

@@ -7,6 +7,7 @@ import { iso } from "../moments";
 import { found } from "../not-found";
 import { revisionsOf } from "../revision/list";
 import { recordOf } from "../revision/show";
+import { tagsOf } from "../tag/load-tags";
 import { revisionOf, shapeOf } from "./load-shape";
 
 /** A shape's sheet at one revision: the one asked for, else the released one, else the one in work. */
@@ -40,6 +41,7 @@ export const sheetOf = async (
     title: shape.title,
     family: ShapeFamily.parse(shape.family),
     series: shape.series,
+    tags: await tagsOf(read, ctx.actor, shape.id),
     bay: shape.bay,
     right: rightIn(ctx.actor, shape.bay.id),
     releasedOrdinal: shape.releasedOrdinal,
