@@ -19,6 +19,8 @@ export type Held = Readonly<{
   /** Hash of the released drawing as the Rack keeps it. */
   contentHash: string;
   tabulated: TabulatedSet;
+  /** What was computed for it: an export of the Rack prints these. */
+  computed: TabulatedSet;
   inWork: boolean;
 }>;
 
@@ -32,6 +34,9 @@ export type Standing = Readonly<{
 
 /** Values that differ by less than this share are the same printed figure after conversion of units. */
 const SAME_FIGURE_REL = 1e-9;
+
+const same = (a: number, b: number | undefined): boolean =>
+  b !== undefined && Math.abs(a - b) <= SAME_FIGURE_REL * Math.abs(b);
 
 /**
  * A row against the Rack: nothing there (new), the same drawing and figures (unchanged), other ones (changed: a further
@@ -62,11 +67,10 @@ export function standingOf(
     };
   const keys: readonly FigureKey[] = [...COMPARED_KEYS, ...UNCOMPARED_KEYS];
   const differences = keys.flatMap((key) => {
-    const [before, after] = [held.tabulated[key] ?? null, next.tabulated[key] ?? null];
-    const same =
-      before === after ||
-      (before !== null && after !== null && Math.abs(before - after) <= SAME_FIGURE_REL * before);
-    return same ? [] : [{ key, before, after }];
+    const after = next.tabulated[key];
+    // A table that does not print a figure says nothing about it.
+    if (after === undefined || same(after, held.tabulated[key]) || same(after, held.computed[key])) return [];
+    return [{ key, before: held.tabulated[key] ?? held.computed[key] ?? null, after }];
   });
   const outline = held.contentHash !== next.contentHash;
   if (!outline && differences.length === 0)

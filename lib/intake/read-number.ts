@@ -23,7 +23,7 @@ const FRACTION = /^([+-]?)(?:(\d+)[ -])?(\d+)\/(\d+)$/;
 const ONE_MARK = /^([+-]?)(\d*)([.,])(\d+)(e[+-]?\d{1,3})?$/i;
 const GROUPED = /^([+-]?)(\d{1,3})([.,' ])(\d{3}(?:\3\d{3})*)(?:([.,])(\d+))?$/;
 
-const LARGEST = 1e18;
+const LARGEST = 1e30;
 
 function finite(value: number, halfUnit: number, otherMark = false): NumberRead {
   if (!Number.isFinite(value) || Math.abs(value) > LARGEST) return { kind: "outOfRange" };

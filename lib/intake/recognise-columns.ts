@@ -141,7 +141,7 @@ const USUAL: Record<"metric" | "inch", Partial<Record<UnitKind, FileUnitKey>>> =
     inertia: "cm4",
     warping: "cm6",
     mass: "kg/m",
-    slope: "%",
+    slope: "ratio",
   },
   inch: {
     length: "in",

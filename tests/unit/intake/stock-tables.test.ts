@@ -128,6 +128,7 @@ describe("the plan against the Rack", () => {
     fromTable: true,
     contentHash: "h1",
     tabulated: next.tabulated,
+    computed: {},
     inWork: false,
   };
 
