@@ -61,6 +61,7 @@ export const RACK_OPERATIONS: readonly Operation[] = [
     version: true,
   }),
   get("/shapes/{id}/figure.svg", "shape.figure", "The figure", { media: "image/svg+xml" }),
+  get("/shapes/{id}/uses", "shape.uses", "What is built on a shape", { answer: shape.ShapeUses }),
   get("/shapes/{id}/deeds", "shape.deeds", "The deeds of a shape", { answer: comment.ShapeDeedList }),
   get("/shapes/{id}/compare", "revision.compare", "Two revisions side by side (?from=1&to=2)", {
     answer: RevisionComparison,

@@ -49,3 +49,20 @@ export const decisionLetter = (
     ...(about.answer === "" ? [] : [about.answer]),
   ),
 });
+
+export const outdatedLetter = (
+  about: Readonly<{
+    subject: string;
+    what: "superseded" | "withdrawn";
+    names: readonly string[];
+    by: string;
+    shapeId: string;
+  }>,
+): Words => ({
+  subject: `${about.subject} is ${about.what}: you built on it`,
+  text: lines(
+    `${about.by} has ${about.what === "withdrawn" ? "withdrawn" : "released a newer revision than"} ${about.subject}.`,
+    `Built on it, by you:\n${about.names.map((name) => `- ${name}`).join("\n")}`,
+    `Its sheet: ${linkTo(`/rack/${about.shapeId}`)}`,
+  ),
+});

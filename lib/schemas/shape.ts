@@ -150,3 +150,18 @@ export const ShapeSheet = z.strictObject({
   updatedAt: Moment,
 });
 export type ShapeSheet = z.infer<typeof ShapeSheet>;
+
+/** What is built on a shape, as far as the asker may see it: one's own drawings, and revisions of shapes. */
+export const ShapeUses = z.strictObject({
+  items: z.array(
+    z.strictObject({
+      kind: z.enum(["drawing", "revision"]),
+      id: Id,
+      name: z.string(),
+      /** The revision of this shape that was used. */
+      ordinal: z.number().int(),
+      author: Person,
+    }),
+  ),
+});
+export type ShapeUses = z.infer<typeof ShapeUses>;

@@ -9,8 +9,8 @@ import { logDeed } from "../log-deed";
 import { newId } from "../new-id";
 import { parseInput } from "../parse-input";
 import { revisionOf, shapeOf } from "../shape/load-shape";
+import { rememberUses } from "../shape/remember-uses";
 import { drawingOf, toRecord } from "./load-drawing";
-import { rememberUses } from "./remember-uses";
 
 /** Keeps a private drawing; it may be of a section that cannot be computed yet. */
 export const createDrawing = async ({
@@ -40,7 +40,7 @@ export const insertDrawing = async (
     createdAt: ctx.now,
     updatedAt: ctx.now,
   });
-  await rememberUses(tx, ctx.actor, id, drawing);
+  await rememberUses(tx, ctx.actor, [{ kind: "drawing", id, drawing }]);
   await logDeed(tx, ctx, { verb: "drawing.create", entity: "drawing", entityId: id, subject: name });
   return toRecord(await drawingOf(tx, ctx.actor, id));
 };

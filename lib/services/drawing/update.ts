@@ -8,9 +8,9 @@ import type { VerbArgs, Versioned } from "../context";
 import { logDeed } from "../log-deed";
 import { parseInput } from "../parse-input";
 import { revisionOf, shapeOf } from "../shape/load-shape";
+import { forgetUses, rememberUses } from "../shape/remember-uses";
 import { requireSameVersion } from "../stale";
 import { drawingOf, toRecord } from "./load-drawing";
-import { rememberUses } from "./remember-uses";
 
 /** Saves or renames a private drawing; the window that saves second is told, and neither state is lost. */
 export const updateDrawing = async ({
@@ -38,7 +38,10 @@ export const updateDrawing = async ({
         updatedAt: ctx.now,
       })
       .where(eq(drawings.id, drawingId));
-    if (drawing) await rememberUses(tx, ctx.actor, drawingId, drawing);
+    if (drawing) {
+      await forgetUses(tx, drawingId);
+      await rememberUses(tx, ctx.actor, [{ kind: "drawing", id: drawingId, drawing }]);
+    }
     await logDeed(tx, ctx, {
       verb: "drawing.update",
       entity: "drawing",

@@ -1,7 +1,6 @@
 import "server-only";
 import { eq } from "drizzle-orm";
 import { comments } from "@/db/schema/comments";
-import { drawingUses } from "@/db/schema/drawing-uses";
 import { revisions } from "@/db/schema/revisions";
 import { shapes } from "@/db/schema/shapes";
 import { AppError } from "@/lib/errors";
@@ -9,6 +8,7 @@ import { mayAtAll, requireRight } from "@/lib/permissions";
 import type { Ctx } from "../context";
 import { logDeed } from "../log-deed";
 import { revisionOf, shapeOf } from "../shape/load-shape";
+import { forgetUses } from "../shape/remember-uses";
 import { rewriteFinder } from "../shape/rewrite-finder";
 import { requireSameVersion } from "../stale";
 import { subjectOf, type RevisionAddress } from "./transition";
@@ -24,7 +24,7 @@ export const discardRevision = async ({ ctx, ...address }: { ctx: Ctx } & Revisi
     if (revision.state !== "draft") {
       throw new AppError("conflict", { user: `Only a draft can be thrown away (it is ${revision.state})` });
     }
-    await tx.delete(drawingUses).where(eq(drawingUses.userOf, revision.id));
+    await forgetUses(tx, revision.id);
     await tx.delete(revisions).where(eq(revisions.id, revision.id));
     if (revision.ordinal === 1) {
       await tx.delete(comments).where(eq(comments.shapeId, shape.id));

@@ -4,6 +4,7 @@ import { revisions } from "@/db/schema/revisions";
 import type { RevisionRecord } from "@/lib/schemas/shape";
 import type { Ctx } from "../context";
 import { fourEyesOf, refuseUnchecked } from "./four-eyes";
+import { tellUsers } from "./tell-users";
 import { transition, type RevisionAddress } from "./transition";
 
 /** Releases a submitted revision: everybody finds it, and what was released before is superseded. */
@@ -29,6 +30,8 @@ export const releaseRevision = async ({
             eq(revisions.state, "released"),
           ),
         );
+      if (shape.releasedOrdinal !== null)
+        await tellUsers(tx, ctx, shape, shape.releasedOrdinal, "superseded");
       return {
         revision: { state: "released", releasedAt: ctx.now, releasedBy: ctx.actor.userId },
         shape: { releasedOrdinal: revision.ordinal, workingOrdinal: null },

@@ -2,10 +2,10 @@ import "server-only";
 import { and, eq } from "drizzle-orm";
 import type { z } from "zod";
 import type { Tx } from "@/db/client";
-import { drawingUses } from "@/db/schema/drawing-uses";
 import { figures } from "@/db/schema/figures";
 import type { Drawing } from "@/lib/drawing/schema";
 import { mayAtAll } from "@/lib/permissions";
+import type { Actor } from "@/lib/schemas/access";
 import type { ComputedProperties } from "@/lib/schemas/properties";
 import { type RevisionRecord, UpdateRevisionInput } from "@/lib/schemas/shape";
 import { computeFigures } from "../compute/compute-figures";
@@ -13,8 +13,9 @@ import type { VerbArgs } from "../context";
 import { parseInput } from "../parse-input";
 import { restOf, scalarsOf } from "../shape/figure-values";
 import type { LoadedRevision } from "../shape/load-shape";
+import { forgetUses, rememberUses } from "../shape/remember-uses";
 import { requireEditable } from "../shape/require-editable";
-import { contentHashOf, figureRow, insertFigures, insertUses, usesOf } from "../shape/write-shapes";
+import { contentHashOf, figureRow, insertFigures } from "../shape/write-shapes";
 import { editorsOf } from "./describe";
 import { transition, type RevisionAddress } from "./transition";
 
@@ -35,7 +36,7 @@ export const updateRevision = async ({
     wrongState: "Only a draft can be edited",
     change: async (tx, shape, revision) => {
       await requireEditable(tx, ctx.actor, shape);
-      if (drawing && computed) await replaceFigures(tx, revision, drawing, computed);
+      if (drawing && computed) await replaceFigures(tx, ctx.actor, revision, drawing, computed);
       const json = drawing && JSON.stringify(drawing);
       const editors = new Set([...editorsOf(revision), ctx.actor.userId]);
       return {
@@ -55,6 +56,7 @@ export const updateRevision = async ({
 
 const replaceFigures = async (
   tx: Tx,
+  actor: Actor,
   revision: LoadedRevision,
   drawing: Drawing,
   { properties, engineVersion }: ComputedProperties,
@@ -64,9 +66,6 @@ const replaceFigures = async (
   await insertFigures(tx, [
     figureRow(id, organisationId, "computed", engineVersion, scalarsOf(properties), restOf(properties)),
   ]);
-  await tx.delete(drawingUses).where(eq(drawingUses.userOf, id));
-  await insertUses(
-    tx,
-    usesOf(drawing).map((use) => [organisationId, use.shape, use.revision, "revision", id]),
-  );
+  await forgetUses(tx, id);
+  await rememberUses(tx, actor, [{ kind: "revision", id, drawing }]);
 };

@@ -7,6 +7,7 @@ import { type RevisionRecord, WithdrawRevisionInput } from "@/lib/schemas/shape"
 import type { Ctx, VerbArgs } from "../context";
 import { parseInput } from "../parse-input";
 import { shapeOf } from "../shape/load-shape";
+import { tellUsers } from "./tell-users";
 import { transition, type RevisionAddress } from "./transition";
 
 /** Takes a released revision out of use, with a reason and, where there is one, the shape to use instead. */
@@ -23,7 +24,8 @@ export const withdrawRevision = async ({
     verb: "revision.withdraw",
     from: ["released"],
     wrongState: "Only a released revision can be withdrawn",
-    change: async (tx, shape) => {
+    change: async (tx, shape, revision) => {
+      await tellUsers(tx, ctx, shape, revision.ordinal, "withdrawn");
       const replacement = replacementShapeId && (await replacementOf(tx, ctx, shape.id, replacementShapeId));
       return {
         revision: {

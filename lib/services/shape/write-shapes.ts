@@ -11,6 +11,7 @@ import type { Ctx } from "../context";
 import { newId } from "../new-id";
 import { columnOf, PROPERTY_KEYS, restOf, scalarsOf, type Scalars } from "./figure-values";
 import { FINDER_COLUMNS, finderRow } from "./finder-row";
+import { rememberUses, type UserOfShapes } from "./remember-uses";
 
 /** Where a shape stands that gets a further revision; read inside the same transaction. */
 export type Standing = Readonly<{
@@ -62,7 +63,6 @@ const FIGURE_COLUMNS = [
   ...PROPERTY_KEYS.map(columnOf),
   "rest",
 ];
-const USE_COLUMNS = ["organisation_id", "shape_id", "ordinal", "user_kind", "user_of"];
 
 export const contentHashOf = (drawingJson: string): string =>
   createHash("sha256").update(drawingJson).digest("hex");
@@ -83,18 +83,8 @@ export const figureRow = (
   JSON.stringify(rest),
 ];
 
-/** Shapes a drawing was built from, each revision once. */
-export const usesOf = (drawing: Drawing): readonly { shape: string; revision: number }[] => {
-  const found = new Map<string, { shape: string; revision: number }>();
-  for (const part of drawing.parts) {
-    if ("from" in part && part.from) found.set(`${part.from.shape} ${part.from.revision}`, part.from);
-  }
-  return [...found.values()];
-};
-
 export const insertFigures = (tx: Tx, rows: readonly Row[]) =>
   bulkInsert(tx, "figures", FIGURE_COLUMNS, rows);
-export const insertUses = (tx: Tx, rows: readonly Row[]) => bulkInsert(tx, "drawing_uses", USE_COLUMNS, rows);
 
 const CHUNK = 250;
 
@@ -128,7 +118,7 @@ const writeChunk = async (
   const revisions: Row[] = [];
   const figures: Row[] = [];
   const finder: Row[] = [];
-  const uses: Row[] = [];
+  const users: UserOfShapes[] = [];
   const again: Moved[] = [];
   const written: WrittenShape[] = [];
 
@@ -214,9 +204,7 @@ const writeChunk = async (
         jobs: item.existing?.jobs ?? 0,
       }),
     );
-    for (const use of usesOf(item.drawing)) {
-      uses.push([organisationId, use.shape, use.revision, "revision", revisionId]);
-    }
+    users.push({ kind: "revision", id: revisionId, drawing: item.drawing });
   }
 
   await bulkInsert(tx, "shapes", SHAPE_COLUMNS, shapes);
@@ -224,7 +212,7 @@ const writeChunk = async (
   await bulkInsert(tx, "revisions", REVISION_COLUMNS, revisions);
   await insertFigures(tx, figures);
   await bulkInsert(tx, "finder", FINDER_COLUMNS, finder);
-  await insertUses(tx, uses);
+  await rememberUses(tx, ctx.actor, users);
   return written;
 };
 

@@ -34,8 +34,8 @@ test("whether a change asks for a version is described as the route asks it", ()
 });
 
 test("it is a valid OpenAPI 3.1 document", async () => {
-  const { valid, errors } = await new Validator().validate(JSON.stringify(openApiDocument()));
-  expect(errors ?? []).toEqual([]);
+  const { valid, errors } = await new Validator().validate({ ...openApiDocument() });
+  expect(JSON.stringify(errors ?? []).slice(0, 2000)).toBe("[]");
   expect(valid).toBe(true);
 });
 
