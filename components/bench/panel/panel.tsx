@@ -9,6 +9,7 @@ import { CompareTable } from "@/components/bench/panel/compare-table";
 import { JointsBlock } from "@/components/bench/panel/joints-block";
 import { MoreProperties } from "@/components/bench/panel/more-properties";
 import { Overview } from "@/components/bench/panel/overview";
+import { ShearFieldBlock } from "@/components/bench/panel/shear-field-block";
 import { SlendernessBlock } from "@/components/bench/panel/slenderness-block";
 import { TabulationTable } from "@/components/bench/panel/tabulation-table";
 import { YourDrawings } from "@/components/bench/your-drawings";
@@ -70,6 +71,7 @@ export const Panel = () => {
             </Block>
           )}
           <JointsBlock figures={figures} />
+          <ShearFieldBlock figures={figures} />
           <SlendernessBlock facts={figures.slenderness} />
           <CautionsBlock p={figures.properties} />
         </>

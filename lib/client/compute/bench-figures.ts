@@ -9,6 +9,7 @@ import type { SectionProperties } from "@/lib/section/properties";
 import { jointForces, type JointForce } from "@/lib/section/joint-forces";
 import { pickedProperties } from "@/lib/section/picked-parts";
 import type { Section } from "@/lib/section/section";
+import type { TorsionProperties } from "@/lib/section/torsion/torsion-properties";
 import { sectionProperties } from "@/lib/section/section-properties";
 
 export type BenchRequest = Readonly<{ drawing: Drawing; picked: readonly string[] }>;
@@ -25,6 +26,8 @@ export type BenchFigures = Readonly<{
   slenderness: readonly Slenderness[];
   /** Shear in each line of contact per unit of shear force. */
   jointForces: readonly JointForce[];
+  /** Torsion and shear with their stress fields; null until the second answer, and where they cannot be had. */
+  torsion: TorsionProperties | null;
   /** Without cut-outs; null where the drawing has none. */
   gross: SectionProperties | null;
   /** Of the picked parts alone; null where none or all are picked. */
@@ -73,6 +76,7 @@ export function* benchFigures({ drawing, picked }: BenchRequest): Generator<unde
     tabulation: { x: x.value, y: y.value },
     slenderness: slendernessOf(drawing, section.value.contacts),
     jointForces: jointForces(section.value),
+    torsion: null,
     gross,
     picked: ofPicked?.ok ? ofPicked.value : null,
   });
