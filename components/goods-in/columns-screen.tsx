@@ -7,7 +7,7 @@ import { Button } from "@/components/ui/button";
 import { Notice } from "@/components/ui/notice";
 import { Table, Th } from "@/components/ui/table";
 import { sentenceOf } from "@/lib/client/api";
-import { sendReading, useDeliveryDeed } from "@/lib/client/deliveries";
+import { atWork, sendReading, useDeliveryDeed } from "@/lib/client/deliveries";
 import type { Reading } from "@/lib/intake/schema";
 import type { Delivery, Recognised } from "@/lib/schemas/delivery";
 
@@ -20,19 +20,18 @@ type ColumnsScreenProps = Readonly<{
 /** What was recognised, column by column, with its evidence; a correction reads the file again at once. */
 export function ColumnsScreen({ delivery, recognised, onRefused }: ColumnsScreenProps) {
   const again = useDeliveryDeed(delivery.id, sendReading(delivery.id));
-  const [draft, setDraft] = useState<Reading>(recognised.reading);
-  const fixed = delivery.state !== "read" && delivery.state !== "failed" && delivery.state !== "stopped";
+  // What was asked for stands until the delivery has been read by it, so that the field in hand keeps its place and its focus.
+  const [asked, setAsked] = useState<Reading | null>(null);
+  const busy = again.isPending || atWork(delivery);
+  const draft = busy ? (asked ?? recognised.reading) : recognised.reading;
+  const fixed = delivery.putAwayAt !== null || delivery.state === "putting-away";
   const read = (reading: Reading) => {
-    setDraft(reading);
+    if (busy || fixed) return;
+    setAsked(reading);
     onRefused(null);
     again.mutate(
       { input: { reading }, version: delivery.version },
-      {
-        onError: (cause) => {
-          setDraft(recognised.reading);
-          onRefused(sentenceOf(cause));
-        },
-      },
+      { onError: (cause) => onRefused(sentenceOf(cause)) },
     );
   };
   const change = (index: number, next: Partial<Reading["columns"][number]>) =>
@@ -40,6 +39,12 @@ export function ColumnsScreen({ delivery, recognised, onRefused }: ColumnsScreen
   return (
     <div className="grid min-h-0 grid-cols-[minmax(0,1fr)_380px] max-lg:grid-cols-1">
       <section aria-label="Columns" className="min-h-0 overflow-auto max-lg:overflow-visible">
+        <p
+          role="status"
+          className={busy ? "border-b border-rule px-3 py-1.5 text-note text-ink-2" : "sr-only"}
+        >
+          {busy ? "Reading again by what you changed." : ""}
+        </p>
         {recognised.questions.length > 0 && (
           <Notice kind="conflict" head="Only you can say:" className="border-b border-rule p-3">
             {recognised.questions.join(" ")}
@@ -68,7 +73,7 @@ export function ColumnsScreen({ delivery, recognised, onRefused }: ColumnsScreen
                 key={i}
                 index={i}
                 column={{ ...column, ...draft.columns[i] }}
-                disabled={fixed || again.isPending}
+                disabled={fixed}
                 onChange={(next) => change(i, next)}
               />
             ))}
@@ -79,22 +84,12 @@ export function ColumnsScreen({ delivery, recognised, onRefused }: ColumnsScreen
         aria-label="How the file is read"
         className="min-h-0 overflow-y-auto border-l border-frame max-lg:overflow-visible max-lg:border-t max-lg:border-l-0"
       >
-        <FirstPiece deliveryId={delivery.id} version={delivery.version} />
-        <ReadingFacts
-          recognised={recognised}
-          reading={draft}
-          disabled={fixed || again.isPending}
-          onRead={read}
-        />
+        <FirstPiece deliveryId={delivery.id} />
+        <ReadingFacts recognised={recognised} reading={draft} disabled={fixed} onRead={read} />
         {recognised.corrected && (
           <p className="px-3 pb-3 text-note text-ink-3">
             Corrected by hand.{" "}
-            <Button
-              size="small"
-              kind="plain"
-              disabled={fixed || again.isPending}
-              onClick={() => read(recognised.reading)}
-            >
+            <Button size="small" kind="plain" disabled={fixed} onClick={() => read(recognised.reading)}>
               Read again
             </Button>
           </p>

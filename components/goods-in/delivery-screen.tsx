@@ -80,15 +80,12 @@ export function DeliveryScreen({ initial }: Readonly<{ initial: Delivery }>) {
         )}
         {delivery.fault !== null && !busy && <FaultNotice delivery={delivery} />}
       </div>
-      {busy ? (
+      {delivery.recognised !== null && step === "columns" && state.step === "columns" ? (
+        <ColumnsScreen delivery={delivery} recognised={delivery.recognised} onRefused={setRefusal} />
+      ) : busy ? (
         <WorkingNotice delivery={delivery} />
       ) : delivery.recognised !== null && step === "columns" ? (
-        <ColumnsScreen
-          key={delivery.version}
-          delivery={delivery}
-          recognised={delivery.recognised}
-          onRefused={setRefusal}
-        />
+        <ColumnsScreen delivery={delivery} recognised={delivery.recognised} onRefused={setRefusal} />
       ) : step === "inspect" || step === "away" ? (
         <InspectScreen delivery={delivery} onRefused={setRefusal} />
       ) : (

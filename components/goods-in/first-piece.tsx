@@ -11,11 +11,11 @@ const ShapeFigure = dynamic(() => import("@/components/rack/shape-figure"), { ss
 const SHOW: FigureShow = { dimensions: true, axes: true, balloons: false, centroidDimension: false };
 
 /** Row 1 drawn and computed by the matching at hand, so that a wrong column shows at once. */
-export function FirstPiece({ deliveryId, version }: Readonly<{ deliveryId: string; version: number }>) {
+export function FirstPiece({ deliveryId }: Readonly<{ deliveryId: string }>) {
   const row = useRow(deliveryId, 1);
   const detail = row.data;
   return (
-    <section aria-label="First piece" data-version={version}>
+    <section aria-label="First piece">
       <PaneHead>
         First piece <span className="text-note font-regular text-ink-3">row 1, read as matched at left</span>
       </PaneHead>

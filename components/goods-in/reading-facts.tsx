@@ -32,6 +32,9 @@ const MARKS = [
   { value: ".'", label: "point, thousands apostrophe", marks: { decimal: ".", thousands: "'" } },
 ] as const;
 
+/** Headings are looked for in the first 20 lines. */
+const LINES = Array.from({ length: 20 }, (_, i) => i + 1);
+
 const markOf = ({ marks }: Reading): string =>
   marks === null ? "" : `${marks.decimal}${marks.thousands ?? ""}`;
 
@@ -70,6 +73,27 @@ export function ReadingFacts({ recognised, reading, disabled, onRead }: ReadingF
             onRead({ ...reading, marks: MARKS.find((m) => m.value === value)?.marks ?? null })
           }
           note={evidence.marks}
+        />
+        <SelectField
+          label="Headings in line"
+          value={String(reading.headingLine)}
+          disabled={disabled}
+          choices={LINES.map((line) => ({ value: String(line), label: String(line) }))}
+          onChange={(value) => onRead({ ...reading, headingLine: Number(value), unitLine: null })}
+          note={evidence.headings}
+        />
+        <SelectField
+          label="Units"
+          value={reading.unitLine === null ? "" : String(reading.unitLine)}
+          disabled={disabled}
+          choices={[
+            { value: "", label: "in the headings" },
+            {
+              value: String(reading.unitLine ?? reading.headingLine + 1),
+              label: `in line ${reading.unitLine ?? reading.headingLine + 1}`,
+            },
+          ]}
+          onChange={(value) => onRead({ ...reading, unitLine: value === "" ? null : Number(value) })}
         />
         <SelectField
           label="Family, where the series does not say"

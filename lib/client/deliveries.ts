@@ -6,6 +6,7 @@ import {
   useQuery,
   useQueryClient,
 } from "@tanstack/react-query";
+import { useEffect } from "react";
 import { api, ApiProblem, type Problem } from "@/lib/client/api";
 import { queryKeys } from "@/lib/client/query-keys";
 import type {
@@ -38,19 +39,26 @@ export const useDeliveries = (initial: DeliveryPage) =>
       query.state.data?.pages.some((page) => page.items.some(atWork)) ? 2 * POLL_MS : false,
   });
 
-export const useDelivery = (initial: Delivery) =>
-  useQuery({
+const rowsKey = (id: string) => [...queryKeys.delivery(id), "rows"] as const;
+
+/** One delivery, asked again while it is at work; its rows are asked anew whenever its state has changed. */
+export function useDelivery(initial: Delivery) {
+  const cache = useQueryClient();
+  const query = useQuery({
     queryKey: queryKeys.delivery(initial.id),
     queryFn: async ({ signal }) => (await api.get<Delivery>(`/deliveries/${initial.id}`, { signal })).data,
     initialData: initial,
     staleTime: 5_000,
-    refetchInterval: (query) =>
-      query.state.data !== undefined && atWork(query.state.data) ? POLL_MS : false,
+    refetchInterval: (q) => (q.state.data !== undefined && atWork(q.state.data) ? POLL_MS : false),
   });
+  const { state } = query.data;
+  useEffect(() => {
+    void cache.invalidateQueries({ queryKey: rowsKey(initial.id) });
+  }, [cache, initial.id, state]);
+  return query;
+}
 
 export type RowFilter = Readonly<{ verdict: string | null; cause: string | null; open: boolean }>;
-
-const rowsKey = (id: string) => [...queryKeys.delivery(id), "rows"] as const;
 
 /** Rows of a delivery, refused first; `version` makes a change of the delivery ask anew. */
 export const useRows = (id: string, filter: RowFilter, enabled: boolean) =>

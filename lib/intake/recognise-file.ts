@@ -78,20 +78,25 @@ export function recogniseFile(
   const columns = recogniseColumns(heading.cells, units?.cells ?? null);
   const kept = (options.saved ?? []).find((s) => appliesTo(s.reading, heading.cells));
   const marks = findMarks(numericCells(data, columns.columns));
-  const reading: Reading = corrected ?? {
-    encoding: decoded.encoding,
-    delimiter,
-    marks: kept?.reading.marks ?? marks.marks ?? marksByDelimiter(delimiter, data, columns.columns),
-    headingLine: heading.line,
-    unitLine: units?.line ?? null,
-    columns: (kept === undefined ? columns.columns : withSaved(columns.columns, kept.reading)).map(
-      ({ heading: h, field, unit }) => ({ heading: h, field, unit }),
-    ),
-    tolerance: kept?.reading.tolerance ?? DEFAULT_TOLERANCE,
-    conventions: kept?.reading.conventions ?? [],
-    family: kept?.reading.family ?? null,
-    material: kept?.reading.material ?? "steel",
-  };
+  const fresh = columns.columns.map(({ heading: h, field, unit }) => ({ heading: h, field, unit }));
+  const reading: Reading =
+    corrected === null
+      ? {
+          encoding: decoded.encoding,
+          delimiter,
+          marks: kept?.reading.marks ?? marks.marks ?? marksByDelimiter(delimiter, data, columns.columns),
+          headingLine: heading.line,
+          unitLine: units?.line ?? null,
+          columns: (kept === undefined ? columns.columns : withSaved(columns.columns, kept.reading)).map(
+            ({ heading: h, field, unit }) => ({ heading: h, field, unit }),
+          ),
+          tolerance: kept?.reading.tolerance ?? DEFAULT_TOLERANCE,
+          conventions: kept?.reading.conventions ?? [],
+          family: kept?.reading.family ?? null,
+          material: kept?.reading.material ?? "steel",
+        }
+      : // Another delimiter, encoding or line of headings makes other columns: those are recognised anew.
+        { ...corrected, columns: sameHeadings(corrected, heading.cells) ? corrected.columns : fresh };
   return ok({
     reading,
     columns: columns.columns.map((column, i) => ({
@@ -166,6 +171,9 @@ function marksByDelimiter(
   }
   return { decimal: delimiter === ";" ? "," : ".", thousands: null };
 }
+
+const sameHeadings = (reading: Reading, headings: readonly string[]) =>
+  reading.columns.length === headings.length && reading.columns.every((c, i) => c.heading === headings[i]);
 
 /** Same headings, in any order: the reading was kept for such a file. */
 const appliesTo = (reading: Reading, headings: readonly string[]) =>

@@ -70,6 +70,28 @@ test("the table with defects is decided by keyboard, mended, and what is undecid
     .waitFor();
 });
 
+test("a column matched otherwise is read again at once, and the field in hand keeps its focus", async () => {
+  const librarian = await person({ as: "librarian" });
+  const { page } = librarian;
+  await unload(librarian, `${CSV}/stock-us.csv`);
+  await page.getByRole("button", { name: /left to decide/ }).waitFor();
+  await page.getByRole("button", { name: /Match columns/ }).click();
+  const unit = page.getByRole("combobox", { name: /Column 10, Ix .*unit/ });
+  await unit.focus();
+  await unit.selectOption("cm4");
+  await page.getByRole("button", { name: "Read so" }).first().waitFor();
+  expect(await unit.evaluate((e) => e === document.activeElement)).toBe(true);
+  await page.getByRole("button", { name: "Read so" }).first().click();
+  await page.getByRole("button", { name: "Read so" }).waitFor({ state: "detached" });
+  await page.getByLabel("Toes of angles not printed").click();
+  await page.getByText("Corrected by hand.").waitFor();
+  await page.getByLabel("Name, for the next delivery with these headings").fill("Shop tables, inches");
+  await page.getByRole("button", { name: "Keep", exact: true }).click();
+  await page.getByText("Kept.").waitFor();
+  await expectAccessible(page);
+  await picture(page, "goods-in-columns-us");
+});
+
 test("a file in another encoding is confirmed on its own lines; one that is no table is given back", async () => {
   const librarian = await person({ as: "librarian" });
   const { page } = librarian;

@@ -206,4 +206,14 @@ describe("a kept reading", () => {
         .reading,
     ).toBeNull();
   });
+  test("another delimiter chosen by a person brings other columns, recognised anew", () => {
+    const reading = takeIn(bytesOf(text)).recognition?.reading;
+    if (reading === undefined) throw new Error("the file was not read");
+    const wrong = { ...reading, delimiter: "|" as const };
+    const lines = "Nr|h [mm]\n1;2|200\n";
+    expect(takeIn(bytesOf(lines), { corrected: wrong }).recognition?.reading.columns).toMatchObject([
+      { heading: "Nr" },
+      { heading: "h [mm]", field: "depth" },
+    ]);
+  });
 });
