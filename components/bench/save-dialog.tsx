@@ -23,7 +23,7 @@ const useTaken = (designation: string): boolean | null => {
     enabled: wanted.length > 0,
     staleTime: 5_000,
     queryFn: async ({ signal }) => {
-      const query = { q: wanted, limit: 50, state: "draft,submitted,released,superseded,withdrawn" };
+      const query = { q: wanted, limit: 50, state: "draft,submitted,released,withdrawn" };
       return (await api.get<FinderPage>("/shapes", { query, signal })).data.items;
     },
   });

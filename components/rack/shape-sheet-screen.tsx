@@ -108,7 +108,12 @@ export function ShapeSheetScreen({ initial, revision: asked, firm, me }: ShapeSh
           />
         </div>
       </div>
-      <div className="min-h-0 min-w-0 overflow-y-auto border-l border-frame max-lg:overflow-visible max-md:border-t max-md:border-l-0 print:overflow-visible print:[zoom:.78]">
+      <div
+        role="region"
+        aria-label="Properties and life of the revision"
+        tabIndex={0}
+        className="min-h-0 min-w-0 overflow-y-auto border-l border-frame max-lg:overflow-visible max-md:border-t max-md:border-l-0 print:overflow-visible print:[zoom:.78]"
+      >
         <PaneHead>
           Properties
           <span className="text-note font-regular text-ink-3">

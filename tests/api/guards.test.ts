@@ -105,7 +105,7 @@ describe("problem documents", () => {
   test.each([["1e309"], ["null"], ['"12"'], ['""'], ["-1"], ["0"]])(
     "a plate %s mm wide is refused with the place of the field",
     async (text) => {
-      const raw = JSON.stringify({ drawing: girderDrawing() }).replace('"width":320', `"width":${text}`);
+      const raw = JSON.stringify({ drawing: girderDrawing() }).replace('"width":180', `"width":${text}`);
       const bytes = new TextEncoder().encode(raw);
       const answer = await engineer.send("POST", "/properties", { raw: { bytes, type: "application/json" } });
       expectStatus(answer, 422);

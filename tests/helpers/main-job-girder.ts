@@ -1,7 +1,7 @@
 import type { Drawing } from "@/lib/drawing/schema";
 
-/** An equal-flanged plate girder: two flanges 320 × 22, web 12 × 756, depth 800 mm. */
-export const GIRDER = { depth: 800, flange: { width: 320, thickness: 22 }, web: 12 } as const;
+/** An equal-flanged plate girder: two flanges 180 × 12, web 8 × 476, depth 500 mm. */
+export const GIRDER = { depth: 500, flange: { width: 180, thickness: 12 }, web: 8 } as const;
 const { depth, flange, web } = GIRDER;
 const webHeight = depth - 2 * flange.thickness;
 
