@@ -19,7 +19,14 @@ const config: NextConfig = {
   reactStrictMode: true,
   devIndicators: false,
   images: { unoptimized: true },
-  serverExternalPackages: ["@libsql/client", "libsql", "@node-rs/argon2", "pino"],
+  serverExternalPackages: [
+    "@libsql/client",
+    "libsql",
+    "@node-rs/argon2",
+    "pino",
+    "nodemailer",
+    "smtp-server",
+  ],
   headers: async () => [
     { source: "/:path*", headers: EVERYWHERE },
     { source: "/_next/:path*", headers: [{ key: "Content-Security-Policy", value: FILES }] },

@@ -54,5 +54,6 @@ export const OFFICE_OPERATIONS: readonly Operation[] = [
   }),
   del("/tokens/{id}", "token.revoke", "Revoke a token", { status: 204 }),
   get("/letters", "letter.list", "Letters and how far they came", { answer: LetterList }),
+  get("/log/export.csv", "log.export", "The log as CSV", { query: LogQuery, media: "text/csv" }),
   get("/log", "log.list", "The log of deeds", { query: LogQuery, answer: LogPage }),
 ];

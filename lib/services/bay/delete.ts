@@ -2,6 +2,7 @@ import "server-only";
 import { eq } from "drizzle-orm";
 import { bays } from "@/db/schema/bays";
 import { deliveries } from "@/db/schema/deliveries";
+import { rightRequests } from "@/db/schema/right-requests";
 import { rights } from "@/db/schema/rights";
 import { shapes } from "@/db/schema/shapes";
 import { AppError } from "@/lib/errors";
@@ -37,6 +38,7 @@ export const deleteBay = async ({
       });
     }
     await tx.delete(rights).where(eq(rights.bayId, bayId));
+    await tx.delete(rightRequests).where(eq(rightRequests.bayId, bayId));
     await tx.delete(bays).where(eq(bays.id, bayId));
     await logDeed(tx, ctx, {
       verb: "bay.delete",

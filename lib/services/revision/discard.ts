@@ -1,6 +1,7 @@
 import "server-only";
-import { eq } from "drizzle-orm";
+import { and, eq } from "drizzle-orm";
 import { comments } from "@/db/schema/comments";
+import { drawingUses } from "@/db/schema/drawing-uses";
 import { revisions } from "@/db/schema/revisions";
 import { shapes } from "@/db/schema/shapes";
 import { AppError } from "@/lib/errors";
@@ -26,8 +27,11 @@ export const discardRevision = async ({ ctx, ...address }: { ctx: Ctx } & Revisi
     }
     await forgetUses(tx, revision.id);
     await tx.delete(revisions).where(eq(revisions.id, revision.id));
+    await tx
+      .delete(comments)
+      .where(and(eq(comments.shapeId, shape.id), eq(comments.ordinal, revision.ordinal)));
     if (revision.ordinal === 1) {
-      await tx.delete(comments).where(eq(comments.shapeId, shape.id));
+      await tx.delete(drawingUses).where(eq(drawingUses.shapeId, shape.id));
       await tx.delete(shapes).where(eq(shapes.id, shape.id));
     } else {
       await tx

@@ -3,6 +3,8 @@ import { createBay } from "@/lib/services/bay/create";
 import { deleteBay } from "@/lib/services/bay/delete";
 import { listBays } from "@/lib/services/bay/list";
 import { updateBay } from "@/lib/services/bay/update";
+import { createRightRequest } from "@/lib/services/right-request/create";
+import { putRight } from "@/lib/services/right/put";
 import { findShapes } from "@/lib/services/shape/find";
 import { writeShapes } from "@/lib/services/shape/write-shapes";
 import { rectangleDrawing, rectangleProperties } from "@/tests/helpers/rectangle-properties";
@@ -97,6 +99,12 @@ test("a bay that holds shapes stays; an empty one goes", async () => {
     deleteBay({ ctx: librarian(), bayId: org.bayIds[1], version: full?.version ?? 0 }),
   );
   const made = await createBay({ ctx: librarian(), input: { name: "Passing" } });
+  await createRightRequest({
+    ctx: org.as("designer"),
+    input: { bayId: made.id, right: "draft", reason: "x" },
+  });
+  const memberId = org.actors.designer.membershipId;
+  await putRight({ ctx: org.as("admin"), input: { memberId, bayId: made.id, right: "draft" } });
   await deleteBay({ ctx: librarian(), bayId: made.id, version: 1 });
   await expectLogged(org.db, "bay.delete", made.id, librarian().actor.userId);
 });

@@ -1,6 +1,8 @@
+import Papa from "papaparse";
 import { afterAll, beforeAll, expect, test } from "vitest";
 import { loadActor } from "@/lib/auth/load-actor";
 import { rightIn } from "@/lib/permissions";
+import { exportLog } from "@/lib/services/log/export";
 import { listLog } from "@/lib/services/log/list";
 import { listMembers } from "@/lib/services/member/list";
 import { updateMember } from "@/lib/services/member/update";
@@ -137,4 +139,20 @@ test("the log is for admins, newest first, in pages, and cannot be changed by SQ
   for (const sql of ["UPDATE log SET actor_name = 'x'", "DELETE FROM log"]) {
     await expect(org.db.write((tx) => tx.raw.execute(sql))).rejects.toThrow(/append-only/);
   }
+});
+
+test("the log is exported whole, for admins, with cells that no spreadsheet runs", async () => {
+  await updateOrganisation({ ctx: admin(), version: 2, input: { address: "1 Quay", name: "=cmd()" } });
+  let text = "";
+  for await (const piece of await exportLog({ ctx: admin(), input: {} })) text += piece;
+  const { data } = Papa.parse<string[]>(text.trim().replace(/^\ufeff/, ""));
+  const { rows } = await org.db.reader.execute({
+    sql: "SELECT count(*) FROM log WHERE organisation_id = ?",
+    args: [org.organisationId],
+  });
+  expect(data).toHaveLength(Number(rows[0]?.[0]) + 1);
+  expect(data[1]?.[3]).toBe("'=cmd()");
+  await expect(exportLog({ ctx: org.as("librarian"), input: {} })).rejects.toMatchObject({
+    code: "forbidden",
+  });
 });

@@ -1,7 +1,9 @@
 import { afterAll, beforeAll, expect, test } from "vitest";
 import type { Drawing } from "@/lib/drawing/schema";
+import { createComment } from "@/lib/services/comment/create";
 import { createDrawing } from "@/lib/services/drawing/create";
 import { listShapeUses } from "@/lib/services/shape/uses";
+import { discardRevision } from "@/lib/services/revision/discard";
 import { withdrawRevision } from "@/lib/services/revision/withdraw";
 import { newId } from "@/lib/services/new-id";
 import { newestLetter } from "@/tests/helpers/letters";
@@ -64,4 +66,13 @@ test("a drawing that names shapes there are not, or another organisation's, is k
   await expect(makeDraft(org, org.as("engineer"), { drawing: builtFrom(newId()) })).resolves.toBeDefined();
   expect((await listShapeUses({ ctx: org.as("engineer"), shapeId: id })).items).toEqual([]);
   await expectRefused(org.db, "notFound", () => listShapeUses({ ctx: stranger, shapeId: id }));
+});
+
+test("a draft that is thrown away goes even when something was built on it", async () => {
+  const ctx = org.as("engineer");
+  const draft = await makeDraft(org, ctx);
+  await createComment({ ctx, shapeId: draft.id, input: { text: "Soon" } });
+  await createDrawing({ ctx, input: { name: "Early bird", drawing: builtFrom(draft.id) } });
+  await discardRevision({ ctx, shapeId: draft.id, ordinal: 1, version: 1 });
+  await expectRefused(org.db, "notFound", () => listShapeUses({ ctx, shapeId: draft.id }));
 });
