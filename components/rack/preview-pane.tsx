@@ -101,10 +101,14 @@ export function PreviewPane({ row, bay, compared, canCompare, onCompare }: Previ
         <UsedIn shapeId={row.id} letter={row.letter} />
       </div>
       <div className="flex flex-none gap-1.5 border-t border-rule px-3 py-2 [&>*]:flex-1 [&>*]:px-1.5 [&>*]:text-table">
-        <Link href={`/rack/${row.id}`} className={buttonClass()}>
+        <Link prefetch={false} href={`/rack/${row.id}`} className={buttonClass()}>
           Open sheet <Kbd>Enter</Kbd>
         </Link>
-        <Link href={`/bench?from=${row.id}&revision=${row.ordinal}`} className={buttonClass()}>
+        <Link
+          prefetch={false}
+          href={`/bench?from=${row.id}&revision=${row.ordinal}`}
+          className={buttonClass()}
+        >
           Copy to Bench <Kbd>B</Kbd>
         </Link>
         <Button onClick={onCompare} aria-pressed={compared} disabled={!compared && !canCompare}>

@@ -131,7 +131,7 @@ export function RackScreen({ first, firstQuery, bays, mayDraft, mayDeliver }: Ra
               actions={
                 <>
                   {mayDraft && (
-                    <Link href="/bench" className={buttonClass({ kind: "main" })}>
+                    <Link prefetch={false} href="/bench" className={buttonClass({ kind: "main" })}>
                       Draw the first
                     </Link>
                   )}

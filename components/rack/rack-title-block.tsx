@@ -9,6 +9,7 @@ import { Kbd } from "@/components/ui/marks";
 import { Select } from "@/components/ui/select";
 import { Arrow } from "@/components/ui/signs";
 import { apiUrl } from "@/lib/client/api";
+import { useWaiting } from "@/lib/client/waiting";
 import type { FinderRow } from "@/lib/schemas/find-shapes";
 
 type RackTitleBlockProps = Readonly<{
@@ -34,6 +35,7 @@ const OFTEN = new Set(["mass", "-SxPerMass", "-Sx", "-Ix", "depth", "designation
 export function RackTitleBlock(props: RackTitleBlockProps) {
   const { phone, sort, onSort, rows, total, query, compared, rowsKnown, onForget, mayDraft } = props;
   const { settings } = useDisplay();
+  const toCheck = useWaiting().data?.toCheck ?? 0;
   const now = readSort(sort);
   const nowValue = now.falling ? `-${now.column}` : now.column;
   const names = compared.map(
@@ -91,6 +93,15 @@ export function RackTitleBlock(props: RackTitleBlockProps) {
       </Cell>
       <span className="min-w-0 flex-1 xl:hidden" />
       <ActionCell>
+        {toCheck > 0 && (
+          <Link
+            prefetch={false}
+            href="/rack/to-check"
+            className={`${buttonClass({ kind: "plain" })} px-[18px] text-oxide-ink max-md:hidden`}
+          >
+            {toCheck} to check
+          </Link>
+        )}
         {total !== 0 && (
           <>
             <a
@@ -111,7 +122,11 @@ export function RackTitleBlock(props: RackTitleBlockProps) {
           </>
         )}
         {mayDraft && (
-          <Link href="/bench" className={`${buttonClass({ kind: "main" })} px-[18px] max-sm:hidden`}>
+          <Link
+            prefetch={false}
+            href="/bench"
+            className={`${buttonClass({ kind: "main" })} px-[18px] max-sm:hidden`}
+          >
             New shape on the Bench
           </Link>
         )}

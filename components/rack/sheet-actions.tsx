@@ -38,6 +38,7 @@ export function SheetActions({ sheet, life }: SheetActionsProps) {
         </Button>
         {may.edit && (
           <Link
+            prefetch={false}
             href={bench}
             className={may.submit ? `${buttonClass({ kind: "plain" })} px-[18px] max-sm:hidden` : mainClass}
           >
@@ -74,12 +75,13 @@ export function SheetActions({ sheet, life }: SheetActionsProps) {
           </Button>
         )}
         {state !== "draft" && may.revise && !mainRelease && !may.check && (
-          <Link href={bench} className={`${mainClass} max-sm:hidden`}>
+          <Link prefetch={false} href={bench} className={`${mainClass} max-sm:hidden`}>
             Revise on the Bench
           </Link>
         )}
         {!may.revise && !may.edit && !may.check && !mainRelease && (
           <Link
+            prefetch={false}
             href={`/bench?from=${sheet.id}&revision=${revision.ordinal}`}
             className={`${mainClass} max-sm:hidden`}
           >
