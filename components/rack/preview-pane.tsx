@@ -106,7 +106,7 @@ export function PreviewPane({ row, bay, compared, canCompare, onCompare }: Previ
         </Link>
         <Link
           prefetch={false}
-          href={`/bench?from=${row.id}&revision=${row.ordinal}`}
+          href={`/bench?shape=${row.id}&revision=${row.ordinal}`}
           className={buttonClass()}
         >
           Copy to Bench <Kbd>B</Kbd>

@@ -82,7 +82,7 @@ export function SheetActions({ sheet, life }: SheetActionsProps) {
         {!may.revise && !may.edit && !may.check && !mainRelease && (
           <Link
             prefetch={false}
-            href={`/bench?from=${sheet.id}&revision=${revision.ordinal}`}
+            href={`/bench?shape=${sheet.id}&revision=${revision.ordinal}`}
             className={`${mainClass} max-sm:hidden`}
           >
             Copy to Bench

@@ -62,6 +62,6 @@ export function useRackKeys({ rows, inHand, onTakeInHand, onOpen, onCompare }: R
   useShortcut("Escape", () => onTakeInHand(null), inHand !== null);
   useShortcut("c", () => inHand !== null && onCompare(inHand));
   useShortcut("b", () => {
-    if (inHand !== null) router.push(`/bench?from=${inHand}`);
+    if (inHand !== null) router.push(`/bench?shape=${inHand}`);
   });
 }
