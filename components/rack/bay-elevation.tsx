@@ -17,7 +17,7 @@ export function BayElevation({ bays, counts, chosen, onChoose }: BayElevationPro
   return (
     <nav
       aria-label="Bays"
-      className="no-print flex min-w-0 overflow-x-auto border-b-4 border-frame bg-panel [scrollbar-width:thin]"
+      className="no-print relative flex min-w-0 overflow-x-auto border-b-4 border-frame bg-panel [scrollbar-width:thin]"
     >
       <BayButton
         name="All bays"

@@ -44,8 +44,8 @@ export default function CheckTabulation({ drawing, ticked, onTick }: CheckTabula
         />
       </PaneHead>
       {table?.ok ? (
-        <div className="overflow-x-auto">
-          <Table className="[&_td]:px-1.5 [&_th]:px-1.5">
+        <div className="relative overflow-x-auto">
+          <Table className="[&_td]:px-1.5 [&_td:first-child]:pl-3 [&_th]:px-1.5 [&_th:first-child]:pl-3">
             <thead>
               <tr>
                 <Th className="pl-3">Part</Th>

@@ -118,7 +118,7 @@ export function CompareScreen({ sheets, missing }: CompareScreenProps) {
           <p>On the Rack, take a shape in hand and press C; up to six stand here side by side.</p>
         </EmptyBay>
       ) : (
-        <div ref={frame} className="min-w-0 overflow-x-auto">
+        <div ref={frame} className="relative min-w-0 overflow-x-auto">
           <Table className="table-fixed" style={{ minWidth: 190 + sheets.length * 130 }}>
             <colgroup>
               <col className="w-[190px]" />

@@ -2,6 +2,7 @@
 import { useQuery } from "@tanstack/react-query";
 import Link from "next/link";
 import { Quantity, SymbolOf, UnitOf } from "@/components/display/quantity";
+import { TransformedMark } from "@/components/rack/transformed-mark";
 import { PaneHead, Table, Td, Th } from "@/components/ui/table";
 import { api } from "@/lib/client/api";
 import { queryKeys } from "@/lib/client/query-keys";
@@ -13,7 +14,7 @@ const ABOVE = 1.25;
 
 /** The lightest released shapes about as strong as this one: what could stand in for it. */
 export function NearestOnRack({ shapeId, Sx }: { shapeId: string; Sx: number }) {
-  const query = { minSx: Sx * BELOW, maxSx: Sx * ABOVE, sort: "mass", limit: 6 };
+  const query = { minSx: Sx * BELOW, maxSx: Sx * ABOVE, sort: "mass", limit: 6, include: "drawing" };
   const found = useQuery({
     queryKey: queryKeys.shapes(query),
     queryFn: async ({ signal }) => (await api.get<FinderPage>("/shapes", { query, signal })).data.items,
@@ -49,6 +50,7 @@ export function NearestOnRack({ shapeId, Sx }: { shapeId: string; Sx: number }) 
                 <Link className="link" href={`/rack/${row.id}`} prefetch={false}>
                   {row.designation}
                 </Link>
+                <TransformedMark drawing={row.drawing} />
               </Td>
               <Td numeric>
                 <Quantity property="mass" value={row.mass} />

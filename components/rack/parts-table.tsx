@@ -96,7 +96,7 @@ export default function PartsTable({ drawing }: { drawing: Drawing }) {
                 {part.cutout && <span className="text-ink-3"> cut out</span>}
               </Td>
               <Td numeric>{sizesOf(part, settings)}</Td>
-              <Td className="max-w-[76px] truncate" title={grade}>
+              <Td className="max-w-[84px] truncate" title={grade}>
                 {grade}
               </Td>
               <Td numeric>

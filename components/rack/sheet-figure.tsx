@@ -57,7 +57,7 @@ export function SheetFigure({ designation, revision, under }: SheetFigureProps) 
         {revision.state === "draft" && <b className="block text-oxide-ink">draft, not for cutting</b>}
       </header>
       {revision.released && (revision.state === "released" || revision.state === "superseded") && (
-        <div className="absolute top-6 right-[26px] z-[1] max-sm:top-14">
+        <div className="absolute top-6 right-[26px] z-[1] max-md:top-1 max-md:-right-3">
           <Stamp
             word="Released"
             lines={[

@@ -25,7 +25,7 @@ export const Sheet = ({ heading, children, block, zones, className }: SheetProps
         <div className={cx("min-h-0 min-w-0", className)}>{children}</div>
       </ZoneBorder>
     ) : (
-      <div className={cx("min-h-0 min-w-0 overflow-auto", className)}>{children}</div>
+      <div className={cx("relative min-h-0 min-w-0 overflow-auto", className)}>{children}</div>
     )}
     {block}
   </main>
