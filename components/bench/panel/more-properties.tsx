@@ -70,9 +70,31 @@ const linesOf = (p: SectionProperties): Line[] => {
       estimate: p.estimates.Cw,
       note: absentNote(p, "Cw") ?? "",
     },
+    {
+      name: "Polar radius about SC",
+      property: "r0",
+      value: p.r0,
+      estimate: p.estimates.shearCentre,
+      note: absentNote(p, "r0") ?? "",
+    },
+    ...(["Avx", "Avy"] as const).map((property) => ({
+      name: property === "Avx" ? "Shear area, across" : "Shear area, up",
+      property,
+      value: p[property],
+      note: absentNote(p, property) ?? "deflection, ν = 0",
+    })),
+    ...(["betaX", "betaY"] as const).map((property) => ({
+      name: property === "betaX" ? "Asymmetry, x" : "Asymmetry, y",
+      property,
+      value: p[property],
+      note: absentNote(p, property) ?? "",
+    })),
   );
   return lines;
 };
+
+/** Estimates below a hundredth of a per cent are shown as that. */
+const LEAST_SHOWN = 1e-4;
 
 /** Strength, free bending and torsion: one value each, with what it rests on; a missing one says why. */
 export const MoreProperties = ({ p }: { p: SectionProperties | null }) => {
@@ -103,7 +125,8 @@ export const MoreProperties = ({ p }: { p: SectionProperties | null }) => {
             >
               {estimate !== null && estimate !== undefined && (
                 <>
-                  ± <Count value={estimate * 100} decimals={2} /> %{" "}
+                  {estimate < LEAST_SHOWN ? "± under " : "± "}
+                  <Count value={Math.max(estimate, LEAST_SHOWN) * 100} decimals={2} /> %{" "}
                 </>
               )}
               {note}

@@ -4,6 +4,7 @@ import { Block } from "@/components/bench/panel/block";
 import { Count, Quantity, UnitOf } from "@/components/display/quantity";
 import { Select } from "@/components/ui/select";
 import { fieldBands, type FieldName } from "@/lib/figure/field-bands";
+import { silhouetteOf } from "@/lib/figure/silhouette";
 import type { BenchFigures } from "@/lib/client/compute/bench-figures";
 
 const BANDS = 8;
@@ -23,6 +24,7 @@ export const ShearFieldBlock = ({ figures }: { figures: BenchFigures }) => {
   const [name, setName] = useState<FieldName>("shearY");
   const fields = figures.torsion?.fields ?? null;
   const picture = useMemo(() => (fields === null ? null : fieldBands(fields, name, BANDS)), [fields, name]);
+  const outline = silhouetteOf(figures.section);
   const { newtons, unit, label } = LOADS[name];
   const missing = figures.properties.absent.find(({ property }) => property === "Avy")?.detail;
   return (
@@ -48,7 +50,7 @@ export const ShearFieldBlock = ({ figures }: { figures: BenchFigures }) => {
             role="img"
             aria-label={`${label}: shades of the shear stress over the section`}
             viewBox={`${picture.box.x} ${picture.box.y} ${picture.box.width} ${picture.box.height}`}
-            className="h-64 min-w-0 flex-1 basis-48"
+            className="h-64 min-w-0 flex-1 basis-48 overflow-visible"
           >
             {picture.bands.map(({ path }, band) => (
               <path
@@ -59,6 +61,16 @@ export const ShearFieldBlock = ({ figures }: { figures: BenchFigures }) => {
                 shapeRendering="crispEdges"
               />
             ))}
+            {outline !== null && (
+              <path
+                d={outline.path}
+                transform={`translate(${picture.box.x} ${picture.box.y + picture.box.height})`}
+                fill="none"
+                stroke="var(--fb-ink-2)"
+                strokeWidth={1}
+                vectorEffect="non-scaling-stroke"
+              />
+            )}
           </svg>
           <div className="text-note">
             <p className="mb-1 text-ink-3">{unit}</p>
