@@ -137,13 +137,38 @@ test("a cursor of another order is refused instead of skipping rows", async () =
   await expect(find({ sort: "depth", cursor: next ?? "" })).rejects.toMatchObject({ code: "invalid" });
 });
 
-test("the search by least S and I walks its index in order of mass and sorts nothing", async () => {
-  const { rows } = await org.db.reader.execute({
-    sql: `EXPLAIN QUERY PLAN SELECT * FROM finder WHERE organisation_id = ? AND state = 'released' AND Sx >= ? AND Ix >= ?
-          AND (mass, id) > (?, ?) ORDER BY mass, id LIMIT 51`,
-    args: [org.organisationId, 1, 1, 10, "a"],
-  });
-  const plan = rows.map((row) => String(row.detail)).join("\n");
-  expect(plan).toContain("finder_walk");
-  expect(plan).not.toContain("TEMP B-TREE");
+/** What SQLite plans for each statement that the search really sends. */
+const plansOf = async (input: Parameters<typeof find>[0]): Promise<string[]> => {
+  const sent: { sql: string; args: never[] }[] = [];
+  const { execute } = org.db.reader;
+  org.db.reader.execute = ((statement: { sql: string; args: never[] }) => {
+    sent.push(statement);
+    return execute.call(org.db.reader, statement);
+  }) as typeof execute;
+  try {
+    await find(input);
+  } finally {
+    org.db.reader.execute = execute;
+  }
+  const plans: string[] = [];
+  for (const { sql, args } of sent) {
+    const { rows } = await execute.call(org.db.reader, { sql: `EXPLAIN QUERY PLAN ${sql}`, args });
+    plans.push(rows.map((row) => String(row.detail)).join("\n"));
+  }
+  return plans;
+};
+
+test("the search by least S and I walks its index in order of mass and sorts nothing, on the first page and the next", async () => {
+  const { next } = await find({ minSx: "1", minIx: "1", limit: "5" });
+  for (const cursor of [{}, { cursor: next ?? "" }]) {
+    const [plan] = await plansOf({ minSx: "1", minIx: "1", maxDepth: "10000", limit: "5", ...cursor });
+    expect(plan).toContain("finder_walk");
+    expect(plan).not.toContain("TEMP B-TREE FOR ORDER BY");
+  }
+});
+
+test("counting by bay and family reads an index and no row", async () => {
+  const [, hits, all] = await plansOf({ minSx: "1", include: "counts" });
+  expect(hits).toContain("COVERING INDEX finder_facets");
+  expect(all).toContain("COVERING INDEX");
 });
