@@ -5,7 +5,7 @@ import { StarterEditDialog } from "@/components/bench/starter-dialog";
 import { Count } from "@/components/display/quantity";
 import { Button } from "@/components/ui/button";
 import { NoteSign, RefusedSign, UnsymmetricalSign, WarningSign } from "@/components/ui/signs";
-import { mendFloating, mendOverlap, type Mend } from "@/lib/drawing/mend";
+import { mendFloating, mendOverlap, overlappingWith, type Mend } from "@/lib/drawing/mend";
 import type { Drawing } from "@/lib/drawing/schema";
 import { starterOfPart } from "@/lib/drawing/starters/apply-starter";
 import { jointOf } from "@/lib/figure/welds";
@@ -67,7 +67,11 @@ export const Advice = () => {
           head="Not computed."
           deeds={
             fault.code.startsWith("overlap.")
-              ? mendButtons(mendsFor(drawing, fault.code, overlapping(drawing, fault.detail, fault.part)))
+              ? mendButtons(
+                  fault.part === undefined
+                    ? []
+                    : mendOverlap(drawing, [fault.part, ...overlappingWith(drawing, fault.part).slice(0, 1)]),
+                )
               : fault.part && (
                   <Button size="small" onClick={() => fault.part && act.pick([fault.part])}>
                     show it
@@ -155,10 +159,4 @@ const headOf = (code: string): string => {
   if (code === "parts.pointContact") return "Touching in a point.";
   if (code.startsWith("cutout.")) return "Hole.";
   return "Mind.";
-};
-
-/** The two parts a fault of overlapping speaks of: the one it names and the one whose name its sentence holds. */
-const overlapping = (drawing: Drawing, detail: string, part: string | undefined): string[] => {
-  const other = drawing.parts.find((p) => p.id !== part && p.name !== "" && detail.includes(p.name));
-  return part && other ? [part, other.id] : [];
 };

@@ -57,6 +57,22 @@ const cutBack = (drawing: Drawing, part: DrawingPart, own: Box, both: Box): Draw
   }));
 };
 
+/** The parts whose box overlaps that of a part by more than a sliver, the deepest overlap first. */
+export const overlappingWith = (drawing: Drawing, id: string): string[] => {
+  const part = drawing.parts.find((p) => p.id === id);
+  const own = part && partBox(part);
+  if (!own) return [];
+  const sizeOf = (b: Box) => (b.xMax - b.xMin) * (b.yMax - b.yMin);
+  return drawing.parts
+    .flatMap((p) => {
+      const box = p.id === id || p.cutout === true ? null : partBox(p);
+      const both = box && overlapBox(own, box);
+      return both && sizeOf(both) > 1e-6 ? [{ id: p.id, size: sizeOf(both) }] : [];
+    })
+    .sort((a, b) => b.size - a.size)
+    .map((found) => found.id);
+};
+
 /** Ways to part two parts that overlap: set one against the other, or cut the plate back that runs into the other. */
 export const mendOverlap = (drawing: Drawing, ids: readonly string[]): Mend[] => {
   const [a, b] = ids.map((id) => drawing.parts.find((p) => p.id === id));
