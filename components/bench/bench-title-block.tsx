@@ -57,7 +57,7 @@ export const BenchTitleBlock = ({ person }: { person: string }) => {
           maxLength={120}
           autoComplete="off"
           onChange={(event) => act.set({ name: event.target.value })}
-          className="h-6 w-full min-w-24 bg-transparent outline-offset-0 hover:bg-field"
+          className="h-6 w-full min-w-0 bg-transparent outline-offset-0 hover:bg-field"
         />
       </Cell>
       <Cell label="Bay" stays="md">
@@ -93,7 +93,9 @@ export const BenchTitleBlock = ({ person }: { person: string }) => {
       </Cell>
       <ActionCell>
         <FileMenu />
-        <Actions shape={shape} />
+        <span className="contents max-sm:hidden">
+          <Actions shape={shape} />
+        </span>
       </ActionCell>
     </TitleBlock>
   );

@@ -91,7 +91,12 @@ export const DrawingsDialog = ({ onClose }: { onClose: () => void }) => {
                 <Td>
                   <span className="flex gap-1">
                     <Button size="small" asChild>
-                      <Link href={`/bench/${item.id}`} onClick={onClose} aria-label={`Open ${item.name}`}>
+                      <Link
+                        prefetch={false}
+                        href={`/bench/${item.id}`}
+                        onClick={onClose}
+                        aria-label={`Open ${item.name}`}
+                      >
                         open
                       </Link>
                     </Button>

@@ -22,7 +22,7 @@ export const YourDrawings = () => {
             key={item.id}
             className="flex h-7 items-center gap-3 border-b border-rule px-3 text-table max-md:h-11"
           >
-            <Link href={`/bench/${item.id}`} className="link min-w-0 flex-1 truncate">
+            <Link prefetch={false} href={`/bench/${item.id}`} className="link min-w-0 flex-1 truncate">
               {item.name}
             </Link>
             <span className="text-note text-ink-2">

@@ -73,9 +73,9 @@ export const overlappingWith = (drawing: Drawing, id: string): string[] => {
     .map((found) => found.id);
 };
 
-/** Ways to part two parts that overlap: set one against the other, or cut the plate back that runs into the other. */
+/** Ways to part two parts that overlap: set the later one against the earlier, or cut the plate back that runs into the other. */
 export const mendOverlap = (drawing: Drawing, ids: readonly string[]): Mend[] => {
-  const [a, b] = ids.map((id) => drawing.parts.find((p) => p.id === id));
+  const [a, b] = drawing.parts.filter((p) => ids.includes(p.id));
   const [boxA, boxB] = [a && partBox(a), b && partBox(b)];
   const both = boxA && boxB ? overlapBox(boxA, boxB) : null;
   if (!a || !b || !boxA || !boxB || !both) return [];

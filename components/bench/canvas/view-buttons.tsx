@@ -5,7 +5,7 @@ import { cx } from "@/components/ui/cx";
 type ViewButtonsProps = Readonly<{ fit: () => void; zoom: (factor: number) => void }>;
 
 const BUTTON =
-  "-ml-px flex h-6 min-w-6 items-center justify-center border border-edge bg-sheet px-1.5 text-note hover:bg-wash max-md:h-11 max-md:min-w-11";
+  "-ml-px flex h-[26px] min-w-[26px] items-center justify-center border border-edge bg-sheet px-1.5 text-note hover:bg-wash max-md:h-11 max-md:min-w-11";
 
 /** Zoom, fit and the detail glass for those who use no wheel and no keys. */
 export const ViewButtons = ({ fit, zoom }: ViewButtonsProps) => {
@@ -15,7 +15,7 @@ export const ViewButtons = ({ fit, zoom }: ViewButtonsProps) => {
     <div
       role="group"
       aria-label="View"
-      className="absolute top-7 right-3 flex"
+      className="absolute top-7 right-3 flex max-sm:hidden"
       onPointerDown={(event) => event.stopPropagation()}
     >
       <button type="button" className={BUTTON} aria-label="Smaller" onClick={() => zoom(0.8)}>
