@@ -21,6 +21,21 @@ export const startFromShape = async (
   };
 };
 
+/** A sheet of one's own begun from a revision: its parts remember where they came from, the sheet is linked to nothing. */
+export const startFromCopy = async (
+  ctx: Ctx,
+  shapeId: string,
+  ordinal: number | undefined,
+): Promise<BenchStart> => {
+  const sheet = await showShape({ ctx, shapeId, ordinal });
+  const { drawing } = sheet.revision;
+  const from = { shape: sheet.id, revision: sheet.revision.ordinal };
+  return {
+    name: `After ${sheet.designation}`,
+    drawing: { ...drawing, parts: drawing.parts.map((p) => (p.cutout === true ? p : { ...p, from })) },
+  };
+};
+
 /** A saved drawing, with the shape it belongs to while that can still be seen. */
 export const startFromDrawing = async (ctx: Ctx, record: DrawingRecord): Promise<BenchStart> => {
   const saved = {
