@@ -20,7 +20,6 @@ export type ColumnContext = Readonly<{
   pxPerMm: number;
   decimals: Readonly<Partial<Record<PropertyKey | "depth" | "width", number>>>;
   minSx: number | null;
-  inHand: string | null;
 }>;
 
 /** How a column is headed, sorted by, and at which widths it folds away. */
@@ -109,13 +108,7 @@ export const shapeColumns = (context: ColumnContext) =>
     column.display({
       id: "silhouette",
       cell: ({ row }) => (
-        <RowSilhouette
-          drawing={row.original.drawing}
-          pxPerMm={context.pxPerMm}
-          width={30}
-          height={28}
-          inHand={row.original.id === context.inHand}
-        />
+        <RowSilhouette drawing={row.original.drawing} pxPerMm={context.pxPerMm} width={30} height={28} />
       ),
     }),
     column.accessor("designation", {

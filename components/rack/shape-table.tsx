@@ -43,9 +43,8 @@ export function ShapeTable(props: ShapeTableProps) {
         pxPerMm: commonScale(rows, 30, 28),
         decimals: columnDecimalsOf(rows, settings.system),
         minSx,
-        inHand,
       }),
-    [rows, settings.system, minSx, inHand],
+    [rows, settings.system, minSx],
   );
   const table = useTable({ features: rackFeatures, columns, data: rows, getRowId: (row) => row.id });
   const virtual = useVirtualizer({

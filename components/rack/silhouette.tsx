@@ -40,7 +40,7 @@ export function RowSilhouette({ drawing, pxPerMm, width, height, inHand }: RowSi
       height={height}
       viewBox={`0 0 ${width} ${height}`}
       aria-hidden
-      className={cx("block", inHand ? "text-oxide-ink" : "text-ink")}
+      className={cx("block", inHand ? "text-oxide-ink" : "text-ink in-[[aria-selected=true]]:text-oxide-ink")}
     >
       {silhouette && (
         <path
