@@ -85,12 +85,13 @@ export function DecideForm({ delivery, row, onNext, onRefused }: DecideFormProps
   return (
     <form
       aria-label={`Decide row ${row.number}`}
+      className="flex-none border-t border-frame"
       onSubmit={(event) => {
         event.preventDefault();
         send(false);
       }}
     >
-      <fieldset className="grid border-t border-rule px-3 py-1.5">
+      <fieldset className="grid px-3 py-1.5">
         <legend className="sr-only">What is to be done with this row</legend>
         {CHOICES.filter(({ value }) => row.verdict !== "accepted" || possible(value)).map(
           ({ value, label, key }) => (
@@ -147,7 +148,7 @@ export function DecideForm({ delivery, row, onNext, onRefused }: DecideFormProps
             " Both states: what you see is now the stored one; decide again if it still holds."}
         </p>
       )}
-      <div className="sticky bottom-0 flex gap-2 bg-sheet px-3 pt-1 pb-2.5">
+      <div className="flex gap-2 px-3 pt-1 pb-2.5">
         <Button type="submit" className="h-8 flex-1" disabled={missing !== null || decide.isPending}>
           {choice === "mend"
             ? "Mend and read again"

@@ -68,8 +68,8 @@ export function RowPane({ delivery, number, decidable, onNext, onRefused }: RowP
             )}
             <ComparisonTable row={row} />
             <Happened row={row} />
-            {decidable && <DecideForm delivery={delivery} row={row} onNext={onNext} onRefused={onRefused} />}
           </div>
+          {decidable && <DecideForm delivery={delivery} row={row} onNext={onNext} onRefused={onRefused} />}
         </>
       )}
     </aside>
