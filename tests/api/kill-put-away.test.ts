@@ -17,7 +17,11 @@ beforeAll(() => {
 afterAll(() => rmSync(folder, { recursive: true, force: true }));
 
 const STOCK = new Uint8Array(readFileSync(join(ROOT, "fixtures/csv/stock-eu.csv")));
-const ROWS = new TextDecoder().decode(STOCK).trim().split("\n").length - 1;
+/** All 65 rows of the table are accepted; these are the ones that are easy to find again. */
+const IPE_ROWS = new TextDecoder()
+  .decode(STOCK)
+  .split("\n")
+  .filter((line) => line.startsWith("IPE ")).length;
 
 /** Takes the stock in up to the put-away, which is sent and not waited for. */
 const unload = async (url: string): Promise<{ id: string; sent: Promise<unknown> }> => {
@@ -64,17 +68,16 @@ test.each([0, 15, 40, 90, 200])(
 
     const again = await startServer({ database });
     const librarian = await signedIn(again.url, "librarian");
-    const { body } = await librarian.get<{ items: unknown[] }>("/shapes?q=IPE&limit=200");
-    const whole = await librarian.get<{ items: unknown[] }>("/shapes?q=HE&limit=200");
+    const found = await librarian.get<{ items: { designation: string }[] }>("/shapes?q=IPE&limit=200");
+    const away = found.body.items.filter(({ designation }) => designation.startsWith("IPE ")).length;
     const delivery = (await librarian.get<Delivery>(`/deliveries/${id}`)).body;
-    const away = body.items.length + whole.items.length;
-    if (acknowledged) expect(delivery.state).toBe("put-away");
-    if (delivery.state === "put-away") expect(delivery.counts?.rows).toBe(ROWS);
     const admin = await signedIn(again.url, "admin");
     const log = await admin.get<{ items: { entityId: string }[] }>("/log?verb=delivery.putAway&limit=200");
     const told = log.body.items.some((entry) => entry.entityId === id);
-    expect(told).toBe(delivery.state === "put-away" || away > 0);
-    expect(away > 0).toBe(told);
+    expect([0, IPE_ROWS]).toContain(away);
+    expect(told).toBe(away > 0);
+    if (acknowledged) expect(away).toBe(IPE_ROWS);
+    if (delivery.state === "put-away") expect(away).toBe(IPE_ROWS);
     await again.stop();
   },
 );
