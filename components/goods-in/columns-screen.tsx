@@ -1,5 +1,5 @@
 "use client";
-import { useState } from "react";
+import { useEffect, useEffectEvent, useState } from "react";
 import { ColumnRow } from "@/components/goods-in/column-row";
 import { FirstPiece } from "@/components/goods-in/first-piece";
 import { ReadingFacts } from "@/components/goods-in/reading-facts";
@@ -20,13 +20,14 @@ type ColumnsScreenProps = Readonly<{
 /** What was recognised, column by column, with its evidence; a correction reads the file again at once. */
 export function ColumnsScreen({ delivery, recognised, onRefused }: ColumnsScreenProps) {
   const again = useDeliveryDeed(delivery.id, sendReading(delivery.id));
-  // What was asked for stands until the delivery has been read by it, so that the field in hand keeps its place and its focus.
+  // What was asked for stands until the delivery has been read by it, so that the field in hand keeps its place and its focus;
+  // what is changed meanwhile waits its turn.
   const [asked, setAsked] = useState<Reading | null>(null);
+  const [waiting, setWaiting] = useState<Reading | null>(null);
   const busy = again.isPending || atWork(delivery);
-  const draft = busy ? (asked ?? recognised.reading) : recognised.reading;
+  const draft = busy ? (waiting ?? asked ?? recognised.reading) : recognised.reading;
   const fixed = delivery.putAwayAt !== null || delivery.state === "putting-away";
-  const read = (reading: Reading) => {
-    if (busy || fixed) return;
+  const send = (reading: Reading) => {
     setAsked(reading);
     onRefused(null);
     again.mutate(
@@ -34,6 +35,19 @@ export function ColumnsScreen({ delivery, recognised, onRefused }: ColumnsScreen
       { onError: (cause) => onRefused(sentenceOf(cause)) },
     );
   };
+  const read = (reading: Reading) => {
+    if (fixed) return;
+    if (busy) setWaiting(reading);
+    else send(reading);
+  };
+  const next = useEffectEvent(() => {
+    if (waiting === null) return;
+    setWaiting(null);
+    send(waiting);
+  });
+  useEffect(() => {
+    if (!busy) next();
+  }, [busy]);
   const change = (index: number, next: Partial<Reading["columns"][number]>) =>
     read({ ...draft, columns: draft.columns.map((c, i) => (i === index ? { ...c, ...next } : c)) });
   return (

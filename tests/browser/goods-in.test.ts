@@ -85,6 +85,9 @@ test("a column matched otherwise is read again at once, and the field in hand ke
   await page.getByRole("button", { name: "Read so" }).waitFor({ state: "detached" });
   await page.getByLabel("Toes of angles not printed").click();
   await page.getByText("Corrected by hand.").waitFor();
+  await page.waitForFunction(
+    () => document.querySelector('[role="checkbox"][data-state="checked"]') !== null,
+  );
   await page.getByLabel("Name, for the next delivery with these headings").fill("Shop tables, inches");
   await page.getByRole("button", { name: "Keep", exact: true }).click();
   await page.getByText("Kept.").waitFor();
