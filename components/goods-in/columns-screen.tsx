@@ -46,7 +46,9 @@ export function ColumnsScreen({ delivery, recognised, onRefused }: ColumnsScreen
     send(waiting);
   });
   useEffect(() => {
-    if (!busy) next();
+    if (busy) return undefined;
+    const turn = setTimeout(() => next());
+    return () => clearTimeout(turn);
   }, [busy]);
   const change = (index: number, next: Partial<Reading["columns"][number]>) =>
     read({ ...draft, columns: draft.columns.map((c, i) => (i === index ? { ...c, ...next } : c)) });
