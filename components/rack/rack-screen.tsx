@@ -62,7 +62,11 @@ export function RackScreen({ first, firstQuery, bays, mayDraft, mayDeliver }: Ra
     [setState],
   );
   const takeInHand = useCallback((id: string | null) => change({ at: id }), [change]);
-  const open = useCallback((id: string) => router.push(`/rack/${id}`), [router]);
+  // The address first takes the row in hand: a change of it that came after the way out would call that off.
+  const open = useCallback(
+    (id: string) => void setState({ at: id }).then(() => router.push(`/rack/${id}`)),
+    [router, setState],
+  );
   const toggleCompared = useCallback(
     (id: string) => {
       const now = state.with ?? [];

@@ -124,7 +124,9 @@ export function ShapeTable(props: ShapeTableProps) {
                 aria-selected={chosen}
                 tabIndex={chosen || (index < 0 && item.index === 0) ? 0 : -1}
                 data-row={row.id}
-                onClick={() => onTakeInHand(row.id)}
+                onClick={(event) => {
+                  if (!(event.target instanceof Element && event.target.closest("a"))) onTakeInHand(row.id);
+                }}
                 onDoubleClick={() => onOpen(row.id)}
                 className="hover:[&>td]:bg-wash focus-visible:-outline-offset-2"
               >

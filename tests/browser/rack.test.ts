@@ -62,6 +62,17 @@ test("rows are taken in hand, compared and opened by keyboard", async () => {
   await page.getByRole("heading", { level: 1, name: `${name}, revision A` }).waitFor({ state: "attached" });
 });
 
+test("a double press opens the sheet, and going back finds the row in hand", async () => {
+  const { page } = await person({ as: "designer" });
+  await page.goto("/rack?q=PG0530-2");
+  await rows(page).first().click();
+  await page.waitForURL("**at=**");
+  await rows(page).first().dblclick();
+  await page.waitForURL(/\/rack\/[^?]+$/);
+  await page.goBack();
+  await page.locator('tr[aria-selected="true"]').getByText("PG 0530-2").waitFor();
+});
+
 test("text forgives case, spaces and the cross; nothing found says what to loosen", async () => {
   const { page } = await person({ as: "designer" });
   await page.goto("/rack");
@@ -84,7 +95,7 @@ test("text forgives case, spaces and the cross; nothing found says what to loose
 test("the sheet shows what the section is, what was not checked, and prints at a true scale", async () => {
   const { page } = await person({ as: "designer" });
   await page.goto("/rack?q=PG0530-2");
-  await rows(page).first().dblclick();
+  await rows(page).first().getByRole("link").click();
   await page.waitForURL(/\/rack\/[^?]+$/);
   await page.getByRole("img", { name: "Section of PG 0530-2, revision A" }).first().waitFor();
   await page.getByText("Not checked by this sheet").waitFor();
@@ -126,7 +137,7 @@ test("a check, a release and a take are recorded by the people they belong to, o
   await list.page.goto("/rack?state=submitted");
   await rows(list.page).first().waitFor();
   const name = (await rows(list.page).first().locator("td:nth-child(2) a").innerText()).trim();
-  await rows(list.page).first().dblclick();
+  await rows(list.page).first().getByRole("link").click();
   await list.page.waitForURL(/\/rack\/[^?]+/);
   const address = new URL(list.page.url()).pathname;
   await list.page.getByRole("button", { name: /^Check revision/ }).click();
@@ -159,7 +170,7 @@ test("withdrawing asks first, names who took it, and a stale step shows both sta
   const one = await person({ as: "librarian" });
   const two = await person({ as: "admin" });
   await one.page.goto("/rack?q=PG0600-4");
-  await rows(one.page).first().dblclick();
+  await rows(one.page).first().getByRole("link").click();
   await one.page.waitForURL(/\/rack\/[^?]+$/);
   await two.page.goto(one.page.url());
   for (const { page } of [one, two]) {
