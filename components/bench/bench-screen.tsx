@@ -63,7 +63,7 @@ const Work = ({ person }: Pick<BenchScreenProps, "person">) => {
             <FirstUse />
           </div>
         </div>
-        <div className="max-h-[40dvh] flex-none overflow-auto border-t border-frame max-lg:max-h-none">
+        <div className="relative max-h-[40dvh] flex-none overflow-auto border-t border-frame max-lg:max-h-none">
           <PartsTable />
         </div>
         <Advice />

@@ -26,7 +26,10 @@ export const Panel = () => {
   return (
     <div
       aria-busy={stale || undefined}
-      className={cx((stale || faulty) && "[&_.figure]:text-ink-3", "h-full overflow-auto max-lg:h-auto")}
+      className={cx(
+        (stale || faulty) && "[&_.figure]:text-ink-3",
+        "relative h-full overflow-auto max-lg:h-auto",
+      )}
     >
       <Block
         id="properties"
