@@ -36,6 +36,8 @@ export const useAutosave = (owner: string): void => {
     );
     const stop = store.subscribe((now, before) => {
       if (!same(contentOf(now), contentOf(before))) saver.changed();
+      // The shape it was saved as must not be lost to a quick reload.
+      if (now.of !== before.of) saver.again();
       if (before.saveState.kind === "conflict" && now.saveState.kind === "waiting") saver.changed();
     });
     const onReturn = () => saver.again();

@@ -34,6 +34,7 @@ test("a girder is typed by keyboard alone, kept, saved as a draft and submitted"
   await page.getByRole("button", { name: "Submit for release" }).waitFor();
   await page.getByRole("button", { name: "Submit for release" }).click();
   await page.getByText("submitted", { exact: true }).waitFor();
+  await bench.saved();
   await page.reload();
   await page.getByText("KB 632").first().waitFor();
 });
