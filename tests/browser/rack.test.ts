@@ -20,6 +20,7 @@ test("a designer finds shapes by minimum S and I, typed with units, lightest fir
   await page.keyboard.press("Enter");
   await page.waitForURL("**minIx=400000000**");
   await page.getByRole("columnheader", { name: /Over min/ }).waitFor();
+  await page.locator('section[aria-label="Hits"][aria-busy="false"]').waitFor();
   const found = await masses(page);
   expect(found.length).toBeGreaterThan(3);
   expect(found).toEqual([...found].sort((a, b) => a - b));
