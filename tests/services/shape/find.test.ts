@@ -1,3 +1,4 @@
+import type { InArgs, InStatement, ResultSet } from "@libsql/client";
 import { afterAll, beforeAll, expect, test } from "vitest";
 import { findShapes } from "@/lib/services/shape/find";
 import { writeShapes } from "@/lib/services/shape/write-shapes";
@@ -139,12 +140,13 @@ test("a cursor of another order is refused instead of skipping rows", async () =
 
 /** What SQLite plans for each statement that the search really sends. */
 const plansOf = async (input: Parameters<typeof find>[0]): Promise<string[]> => {
-  const sent: { sql: string; args: never[] }[] = [];
+  const sent: { sql: string; args: InArgs }[] = [];
   const { execute } = org.db.reader;
-  org.db.reader.execute = ((statement: { sql: string; args: never[] }) => {
-    sent.push(statement);
-    return execute.call(org.db.reader, statement);
-  }) as typeof execute;
+  const execution: (statement: InStatement) => Promise<ResultSet> = execute.bind(org.db.reader);
+  org.db.reader.execute = (statement: InStatement) => {
+    if (typeof statement !== "string") sent.push({ sql: statement.sql, args: statement.args ?? [] });
+    return execution(statement);
+  };
   try {
     await find(input);
   } finally {
@@ -152,7 +154,7 @@ const plansOf = async (input: Parameters<typeof find>[0]): Promise<string[]> => 
   }
   const plans: string[] = [];
   for (const { sql, args } of sent) {
-    const { rows } = await execute.call(org.db.reader, { sql: `EXPLAIN QUERY PLAN ${sql}`, args });
+    const { rows } = await execution({ sql: `EXPLAIN QUERY PLAN ${sql}`, args });
     plans.push(rows.map((row) => String(row.detail)).join("\n"));
   }
   return plans;
