@@ -1,17 +1,10 @@
 import { WarningSign } from "@/components/ui/signs";
 import type { Drawing } from "@/lib/drawing/schema";
-
-/** The material that the figures of a drawing are transformed for, where its parts differ in E; else null. */
-function referenceOf(drawing: Drawing): string | null {
-  const used = new Set(drawing.parts.flatMap((part) => (part.cutout ? [] : [part.material])));
-  const moduli = new Set(drawing.materials.filter((m) => used.has(m.id)).map((m) => m.E));
-  if (moduli.size < 2) return null;
-  return drawing.materials.find((m) => m.id === drawing.reference)?.name ?? drawing.reference;
-}
+import { transformedFor } from "@/lib/drawing/transformed-for";
 
 /** Marks a row whose A, I and S are transformed for one of its materials: they do not compare with those of a steel section. */
 export function TransformedMark({ drawing }: { drawing: Drawing | undefined }) {
-  const reference = drawing && referenceOf(drawing);
+  const reference = drawing && transformedFor(drawing);
   if (!reference) return null;
   return (
     <span

@@ -1,5 +1,6 @@
 import Papa from "papaparse";
 import type { Drawing } from "@/lib/drawing/schema";
+import { transformedFor } from "@/lib/drawing/transformed-for";
 import { NOT_CHECKED } from "@/lib/export/not-checked";
 import { familyOfRow } from "@/lib/intake/family-of-row";
 import type { DimensionKey } from "@/lib/intake/fields";
@@ -71,6 +72,7 @@ const HEADINGS = [
   "Figures",
   "Unsymmetrical: true stress over Mx/Sx",
   "Unsymmetrical: true stress over My/Sy",
+  "Figures transformed for",
   "Caution",
 ] as const;
 
@@ -101,6 +103,7 @@ const rowOf = (shape: ExportedShape): string[] => {
     ...[shape.letter, shape.state, shape.bay, shape.title, shape.source].map(harmless),
     number(shape.unsymmetrical?.factorX),
     number(shape.unsymmetrical?.factorY),
+    harmless((shape.drawing && transformedFor(shape.drawing)) ?? ""),
   ];
 };
 
