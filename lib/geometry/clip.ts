@@ -63,8 +63,8 @@ export type Cut = Readonly<{ rest: Polygons; common: Polygons }>;
 
 /**
  * Cuts `subject` along the outline of everything in `others`. Vertices are snapped to a grid first (the clipper throws on
- * edges that differ in their last bits), a throw is tried again on coarser grids, and |rest| + |common| = |subject| is
- * asked to hold.
+ * edges that differ in their last bits), a throw is tried again on coarser grids, and |A∖B| + |A∩B| = |A| is asked to
+ * hold: with |A∪B| = |A∖B| + |B|, which `arrange` asks of the outline it traces, |A∪B| + |A∩B| = |A| + |B|.
  * @param others polygons that may overlap each other.
  * @returns the two pieces, or `clip.failed` when no grid gave an answer that adds up.
  */
@@ -76,20 +76,4 @@ export const cutPolygons = (subject: Polygons, others: readonly Polygons[]): Res
     const rest = polygonClipping.difference(a, cover);
     const common = polygonClipping.intersection(a, cover);
     return addUp(polygonsArea(rest), polygonsArea(common), polygonsArea(a)) ? { rest, common } : null;
-  });
-
-/** The union of two sets of polygons and what they have in common. */
-export type United = Readonly<{ all: Polygons; both: Polygons }>;
-
-/**
- * Union and intersection, snapped and retried as `cutPolygons`, with |A∪B| + |A∩B| = |A| + |B| asked to hold.
- * @param a b polygons, each without overlap in itself.
- */
-export const unitePolygons = (a: Polygons, b: Polygons): Result<Clipped<United>> =>
-  onGrids((step) => {
-    const [p, q] = [snapTo(a, step), snapTo(b, step)];
-    const all = polygonClipping.union(p, q);
-    const both = polygonClipping.intersection(p, q);
-    const sum = polygonsArea(p) + polygonsArea(q);
-    return addUp(polygonsArea(all), polygonsArea(both), sum) ? { all, both } : null;
   });
