@@ -23,16 +23,17 @@ export const ringExtent = (ring: Ring): number => {
   return box === null ? 0 : Math.max(box.xMax - box.xMin, box.yMax - box.yMin);
 };
 
-/** A ring without its edges of zero length, and where each vertex stood in the drawn one. */
-type Cleaned = Readonly<{ ring: Ring; drawn: readonly number[] }>;
+/** A ring without its edges of zero length, where each vertex stood in the drawn one, and the longer side of its box, mm. */
+type Cleaned = Readonly<{ ring: Ring; drawn: readonly number[]; extent: number }>;
 
 const clean = (ring: Ring): Cleaned => {
-  const least = SAME_POINT_REL * ringExtent(ring);
+  const extent = ringExtent(ring);
+  const least = SAME_POINT_REL * extent;
   const drawn = ring.flatMap((v, i) => {
     const next = ring[(i + 1) % ring.length];
     return next !== undefined && Math.hypot(next.x - v.x, next.y - v.y) > least ? [i] : [];
   });
-  return { ring: drawn.flatMap((i) => ring[i] ?? []), drawn };
+  return { ring: drawn.flatMap((i) => ring[i] ?? []), drawn, extent };
 };
 
 const checkRing = (ring: Ring, index: number): Result<Cleaned, RingFault> => {
@@ -54,7 +55,7 @@ const checkRing = (ring: Ring, index: number): Result<Cleaned, RingFault> => {
       detail: `The ${name} has ${kept.length} distinct points. It needs three, or two joined by an arc.`,
       ring: index,
     });
-  if (Math.abs(ringArea(kept)) <= NO_AREA_REL * ringExtent(kept) ** 2)
+  if (Math.abs(ringArea(kept)) <= NO_AREA_REL * cleaned.extent ** 2)
     return err({
       code: "ring.noArea",
       detail: `The ${name} encloses no area. Move its points apart.`,
@@ -121,7 +122,7 @@ export const checkRings = (rings: readonly Ring[]): Result<Region, readonly Ring
   if (faults.length > 0) return err(faults);
   const cleaned = checked.flatMap((r) => (r.ok ? [r.value] : []));
   const kept = cleaned.map(({ ring }) => ring);
-  const extent = kept.reduce((most, ring) => Math.max(most, ringExtent(ring)), 0);
+  const extent = cleaned.reduce((most, ring) => Math.max(most, ring.extent), 0);
   const crossing = findCrossing(kept, SAME_POINT_REL * extent);
   if (crossing !== null) return err([crossingFault(cleaned, crossing)]);
   const misplaced = misplacedHoles(kept);

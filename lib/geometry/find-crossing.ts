@@ -1,6 +1,6 @@
 import SplayTree from "splaytree";
 import type { Edge } from "@/lib/geometry/edge";
-import { edgeOf, pointOnEdge } from "@/lib/geometry/edge";
+import { boxesMeet, edgeBox, edgeOf, growBox, pointOnEdge } from "@/lib/geometry/edge";
 import { shareAtAngle } from "@/lib/geometry/arc";
 import { edgesMeet } from "@/lib/geometry/meet";
 import type { Point, Ring } from "@/lib/geometry/region";
@@ -31,8 +31,11 @@ const turned = (ring: Ring, origin: Point): Ring => {
 const stretchesOf = (whole: Whole, order: number): readonly Stretch[] => {
   const { edge } = whole;
   const { arc } = edge;
-  const turns =
-    arc === null ? [] : [shareAtAngle(arc, 0), shareAtAngle(arc, Math.PI)].filter((share) => share !== null);
+  if (arc === null) {
+    const [left, right] = edge.from.x <= edge.to.x ? [edge.from, edge.to] : [edge.to, edge.from];
+    return [{ whole, left, right, upper: false, order }];
+  }
+  const turns = [shareAtAngle(arc, 0), shareAtAngle(arc, Math.PI)].filter((share) => share !== null);
   const shares = [0, ...turns.toSorted((a, b) => a - b), 1];
   return shares.slice(1).flatMap((end, i) => {
     const start = shares[i] ?? 0;
@@ -40,7 +43,7 @@ const stretchesOf = (whole: Whole, order: number): readonly Stretch[] => {
     const [p, q] = [pointOnEdge(edge, start), pointOnEdge(edge, end)];
     const [left, right] = p.x <= q.x ? [p, q] : [q, p];
     const middle = pointOnEdge(edge, (start + end) / 2);
-    return [{ whole, left, right, upper: arc !== null && middle.y > arc.centre.y, order: order + i / 4 }];
+    return [{ whole, left, right, upper: middle.y > arc.centre.y, order: order + i / 4 }];
   });
 };
 
@@ -78,10 +81,17 @@ const sharedEnds = (a: Whole, b: Whole): readonly Point[] => {
   ];
 };
 
+/** Whether two lines lie further apart, along x or y, than any point can be within the tolerance of both. */
+const farApart = ({ edge: a }: Whole, { edge: b }: Whole, tolerance: number): boolean =>
+  a.arc === null &&
+  b.arc === null &&
+  !boxesMeet(growBox(edgeBox(a), 2 * tolerance), growBox(edgeBox(b), 2 * tolerance));
+
 const radiusOf = ({ arc }: Edge): number => arc?.radius ?? 0;
 
 /** A point two edges share other than the vertex that joins neighbours in a ring. */
 const badMeeting = (a: Whole, b: Whole, tolerance: number): Point | null => {
+  if (farApart(a, b, tolerance)) return null;
   const shared = sharedEnds(a, b);
   const points = edgesMeet(a.edge, b.edge, tolerance);
   if (shared.length === 0) return points[0] ?? null;
