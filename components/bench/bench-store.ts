@@ -1,5 +1,5 @@
 "use client";
-import { createContext, useContext } from "react";
+import { createContext, useContext, useMemo } from "react";
 import { useStore } from "zustand";
 import { createStore, type StoreApi } from "zustand/vanilla";
 import type { BenchFigures } from "@/lib/client/compute/bench-figures";
@@ -151,4 +151,8 @@ export const useBenchContext = (): Bench => {
 
 export const useBench = <T>(select: (state: BenchState) => T): T => useStore(useBenchContext().store, select);
 export const useBenchActions = (): BenchActions => useBenchContext().act;
-export const useDrawing = (): Drawing => useBench((s) => s.history.now);
+/** Number of each part in the table by its id; the same map until parts come, go or change places. */
+export const useItems = (): ReadonlyMap<string, number> => {
+  const ids = useBench((s) => s.history.now.parts.map((p) => p.id).join(" "));
+  return useMemo(() => new Map(ids.split(" ").map((id, i) => [id, i + 1])), [ids]);
+};

@@ -93,9 +93,7 @@ export const BenchTitleBlock = ({ person }: { person: string }) => {
       </Cell>
       <ActionCell>
         <FileMenu />
-        <span className="contents max-sm:hidden">
-          <Actions shape={shape} />
-        </span>
+        <Actions shape={shape} />
       </ActionCell>
     </TitleBlock>
   );
@@ -129,7 +127,13 @@ const Actions = ({ shape }: { shape: ShapeLink | null }) => {
   return (
     <>
       {shape === null && (
-        <Button kind="main" disabled={why !== undefined} title={why} onClick={() => setOpen("save")}>
+        <Button
+          kind="main"
+          className="max-sm:hidden"
+          disabled={why !== undefined}
+          title={why}
+          onClick={() => setOpen("save")}
+        >
           Save into a bay
         </Button>
       )}
@@ -146,6 +150,7 @@ const Actions = ({ shape }: { shape: ShapeLink | null }) => {
       {shape?.revision.may.submit && (
         <Button
           kind="main"
+          className="max-sm:hidden"
           atWork={busy}
           disabled={busy || why !== undefined}
           title={why}
@@ -157,6 +162,7 @@ const Actions = ({ shape }: { shape: ShapeLink | null }) => {
       {shape !== null && !shape.revision.may.edit && (
         <Button
           kind="main"
+          className="max-sm:hidden"
           disabled={!differs || why !== undefined}
           title={
             differs

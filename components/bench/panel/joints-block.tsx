@@ -1,5 +1,5 @@
 "use client";
-import { useBench, useBenchActions } from "@/components/bench/bench-store";
+import { useBench, useBenchActions, useItems } from "@/components/bench/bench-store";
 import { Block } from "@/components/bench/panel/block";
 import { useDisplay } from "@/components/display/display-provider";
 import { Count, UnitOf } from "@/components/display/quantity";
@@ -18,7 +18,8 @@ const positive = (mm: number) => (mm > 0 ? null : "A size above 0, or leave it e
 /** Every pair of parts that touch, with kind and size of what joins them and the shear it takes per unit of shear force. */
 export const JointsBlock = ({ figures }: { figures: BenchFigures }) => {
   const act = useBenchActions();
-  const drawing = useBench((s) => s.history.now);
+  const joints = useBench((s) => s.history.now.joints);
+  const items = useItems();
   const { settings } = useDisplay();
   const words = WORDS[settings.notation];
   const names: Record<DrawingJoint["kind"], string> = {
@@ -28,7 +29,7 @@ export const JointsBlock = ({ figures }: { figures: BenchFigures }) => {
     bolts: "bolts",
     none: "none",
   };
-  const item = (id: string) => drawing.parts.findIndex((p) => p.id === id) + 1;
+  const item = (id: string) => items.get(id);
   return (
     <Block
       id="joints-block"
@@ -62,7 +63,7 @@ export const JointsBlock = ({ figures }: { figures: BenchFigures }) => {
               {figures.section.contacts.map(({ parts }) => {
                 const [a, b] = parts;
                 const pair = `${item(a)}–${item(b)}`;
-                const joint = jointOf(drawing.joints, parts);
+                const joint = jointOf(joints, parts);
                 const force = figures.jointForces.find((f) => f.parts.includes(a) && f.parts.includes(b));
                 const change = (next: Partial<DrawingJoint>) => act.edit((d) => changeJoint(d, parts, next));
                 const size = (key: "size" | "length" | "pitch", name: string) => (

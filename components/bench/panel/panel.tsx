@@ -1,5 +1,5 @@
 "use client";
-import { useState } from "react";
+import { memo, useDeferredValue, useState } from "react";
 import { useBench } from "@/components/bench/bench-store";
 import { AboutAxes } from "@/components/bench/panel/about-axes";
 import { Block } from "@/components/bench/panel/block";
@@ -15,14 +15,17 @@ import { TabulationTable } from "@/components/bench/panel/tabulation-table";
 import { YourDrawings } from "@/components/bench/your-drawings";
 import { useDisplay } from "@/components/display/display-provider";
 import { cx } from "@/components/ui/cx";
+import type { BenchFigures } from "@/lib/client/compute/bench-figures";
 import { axisLetter } from "@/lib/units/notation";
+
+const useStale = () => useBench((s) => s.figures !== null && s.figuresOf !== s.history.now);
 
 /** The figures of what is drawn, in blocks that fold; stale ones are greyed until the new ones are there. */
 export const Panel = () => {
-  const figures = useBench((s) => s.figures);
-  const stale = useBench((s) => s.figures !== null && s.figuresOf !== s.history.now);
+  // Deferred: a hundred rows of figures give way to the hand that drags.
+  const figures = useDeferredValue(useBench((s) => s.figures));
+  const stale = useStale();
   const faulty = useBench((s) => s.faults.length > 0);
-  const p = figures?.properties ?? null;
   return (
     <div
       aria-busy={stale || undefined}
@@ -31,18 +34,27 @@ export const Panel = () => {
         "relative h-full overflow-auto max-lg:h-auto",
       )}
     >
+      <Blocks figures={figures} />
+    </div>
+  );
+};
+
+const Note = ({ net }: { net: boolean }) => {
+  const stale = useStale();
+  const faulty = useBench((s) => s.faults.length > 0);
+  if (stale) return <>computing</>;
+  if (faulty) return <>of the last state that could be computed</>;
+  return <>of the {net ? "net" : "gross"} section, from datum 0, 0</>;
+};
+
+const Blocks = memo(function Blocks({ figures }: { figures: BenchFigures | null }) {
+  const p = figures?.properties ?? null;
+  return (
+    <>
       <Block
         id="properties"
         title="Properties"
-        note={
-          stale
-            ? "computing"
-            : faulty
-              ? "of the last state that could be computed"
-              : figures?.gross
-                ? "of the net section, from datum 0, 0"
-                : "of the gross section, from datum 0, 0"
-        }
+        note={<Note net={figures?.gross !== null && figures !== null} />}
       >
         <Overview p={p} />
         <AboutAxes p={p} />
@@ -51,7 +63,7 @@ export const Panel = () => {
       {!figures && <YourDrawings />}
       {figures && (
         <>
-          <TabulationBlock />
+          <TabulationBlock figures={figures} />
           <ChangeBlock p={figures.properties} />
           {figures.picked && (
             <Block id="picked" title="Picked parts" note="as if the others were not there">
@@ -79,15 +91,13 @@ export const Panel = () => {
           <CautionsBlock p={figures.properties} />
         </>
       )}
-    </div>
+    </>
   );
-};
+});
 
-const TabulationBlock = () => {
-  const figures = useBench((s) => s.figures);
+const TabulationBlock = ({ figures }: { figures: BenchFigures }) => {
   const { settings } = useDisplay();
   const [axis, setAxis] = useState<"x" | "y">("x");
-  if (!figures) return null;
   const letter = (a: "x" | "y") => axisLetter(a, settings.notation);
   return (
     <Block

@@ -1,5 +1,5 @@
 "use client";
-import { useBench } from "@/components/bench/bench-store";
+import { useItems } from "@/components/bench/bench-store";
 import { Block } from "@/components/bench/panel/block";
 import { Count, Quantity, UnitOf } from "@/components/display/quantity";
 import { Balloon } from "@/components/ui/marks";
@@ -8,7 +8,7 @@ import type { Slenderness } from "@/lib/drawing/slenderness";
 
 /** b/t facts: widths from face to free edge or between faces, without fillets; the code's limits are not applied. */
 export const SlendernessBlock = ({ facts }: { facts: readonly Slenderness[] }) => {
-  const drawing = useBench((s) => s.history.now);
+  const items = useItems();
   if (facts.length === 0) return null;
   return (
     <Block id="slenderness" title="b/t" note="fillets and welds left out; no class is derived">
@@ -31,7 +31,7 @@ export const SlendernessBlock = ({ facts }: { facts: readonly Slenderness[] }) =
             <tr key={`${f.part}-${f.element}-${f.kind}`}>
               <Td>
                 <span className="inline-flex items-center gap-2">
-                  <Balloon>{drawing.parts.findIndex((p) => p.id === f.part) + 1}</Balloon> {f.element}
+                  <Balloon>{items.get(f.part)}</Balloon> {f.element}
                 </span>
               </Td>
               <Td className="text-ink-2">{f.kind}</Td>

@@ -1,5 +1,5 @@
 "use client";
-import { useBench, useBenchActions } from "@/components/bench/bench-store";
+import { useBench, useBenchActions, useItems } from "@/components/bench/bench-store";
 import { useDisplay } from "@/components/display/display-provider";
 import { SetFigure, UnitText } from "@/components/display/quantity";
 import { Balloon } from "@/components/ui/marks";
@@ -17,7 +17,7 @@ const COLUMNS = {
 /** Parallel axes line by line, with the sums and how ȳ and I follow from them. */
 export const TabulationTable = ({ table }: { table: Tabulation }) => {
   const { settings } = useDisplay();
-  const drawing = useBench((s) => s.history.now);
+  const items = useItems();
   const picked = useBench((s) => s.picked);
   const act = useBenchActions();
   const columns = COLUMNS[settings.system];
@@ -74,7 +74,7 @@ export const TabulationTable = ({ table }: { table: Tabulation }) => {
                 onPointerLeave={() => act.hover(null)}
               >
                 <Td>
-                  <Balloon inHand={inHand}>{drawing.parts.findIndex((p) => p.id === row.part) + 1}</Balloon>
+                  <Balloon inHand={inHand}>{items.get(row.part)}</Balloon>
                 </Td>
                 {table.transformed && (
                   <Td numeric>

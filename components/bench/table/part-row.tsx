@@ -10,7 +10,6 @@ import { cx } from "@/components/ui/cx";
 import { fieldClass } from "@/components/ui/field";
 import { Balloon } from "@/components/ui/marks";
 import { Select } from "@/components/ui/select";
-import type { PartFigures } from "@/lib/client/compute/bench-figures";
 import { typedMm } from "@/lib/drawing/add-row";
 import { changePart } from "@/lib/drawing/edit-parts";
 import type { DrawingMaterial, DrawingPart } from "@/lib/drawing/schema";
@@ -29,21 +28,22 @@ type PartRowProps = Readonly<{
   item: number;
   inHand: boolean;
   materials: readonly DrawingMaterial[];
-  figures: PartFigures | null;
-  slenderness: Slenderness | null;
-  stale: boolean;
+  /** Area in mm², mass in kg/m; undefined until they are computed. */
+  area: number | undefined;
+  mass: number | undefined;
+  slendernessRatio: number | undefined;
+  slendernessKind: Slenderness["kind"] | undefined;
 }>;
 
 const CELL = "h-7 border-b border-rule px-[3px] max-md:h-11";
 
 /** One part, every number of it to be typed. Focus in the row picks the part, as a click on the canvas does. */
 export const PartRow = memo(function PartRow(props: PartRowProps) {
-  const { part, item, inHand, materials, figures, slenderness, stale } = props;
+  const { part, item, inHand, materials, area, mass, slendernessRatio, slendernessKind } = props;
   const act = useBenchActions();
   const change = (next: (p: DrawingPart) => DrawingPart) => act.edit((d) => changePart(d, part.id, next));
   const [width, height] = sizeFields(part);
   const box = width === null ? partBox(part) : null;
-  const old = stale ? "text-ink-3" : "";
   return (
     <tr
       data-part={part.id}
@@ -132,20 +132,20 @@ export const PartRow = memo(function PartRow(props: PartRowProps) {
           />
         )}
       </td>
-      <td className={cx(CELL, old, "px-2 text-right")}>
-        <Quantity dimension="area" value={figures?.area} />
+      <td className={cx(CELL, "computed", "px-2 text-right")}>
+        <Quantity dimension="area" value={area} />
       </td>
-      <td className={cx(CELL, old, "px-2 text-right")}>
-        <Quantity dimension="linearMass" value={figures?.mass} />
+      <td className={cx(CELL, "computed", "px-2 text-right")}>
+        <Quantity dimension="linearMass" value={mass} />
       </td>
       <td
-        className={cx(CELL, old, "px-2 text-right whitespace-nowrap max-lg:hidden")}
-        title={slenderness?.kind}
+        className={cx(CELL, "computed", "px-2 text-right whitespace-nowrap max-lg:hidden")}
+        title={slendernessKind}
       >
-        {slenderness && (
+        {slendernessRatio !== undefined && (
           <>
-            <Count value={slenderness.ratio} decimals={1} />
-            {slenderness.kind === "between faces" && <span className="text-note text-ink-3"> faces</span>}
+            <Count value={slendernessRatio} decimals={1} />
+            {slendernessKind === "between faces" && <span className="text-note text-ink-3"> faces</span>}
           </>
         )}
       </td>

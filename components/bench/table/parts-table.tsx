@@ -63,7 +63,11 @@ export const PartsTable = () => {
   const wide = useMedia("(min-width: 820px)");
   const has = drawing.parts.length > 0;
   return (
-    <table className="w-full border-collapse text-table" onKeyDown={walk} aria-label="Parts">
+    <table
+      className={cx("w-full border-collapse text-table", stale && "[&_.computed]:text-ink-3")}
+      onKeyDown={walk}
+      aria-label="Parts"
+    >
       <thead>
         <tr>
           <Head className="w-9">
@@ -109,9 +113,10 @@ export const PartsTable = () => {
             item={i + 1}
             inHand={picked.includes(part.id)}
             materials={drawing.materials}
-            figures={figures?.parts[part.id] ?? null}
-            slenderness={least.get(part.id) ?? null}
-            stale={stale}
+            area={figures?.parts[part.id]?.area}
+            mass={figures?.parts[part.id]?.mass}
+            slendernessRatio={least.get(part.id)?.ratio}
+            slendernessKind={least.get(part.id)?.kind}
           />
         ))}
       </tbody>
