@@ -28,6 +28,9 @@ import type { Point } from "@/lib/geometry/region";
 import type { Context } from "konva/lib/Context";
 
 const NONE: readonly Stroke[] = [];
+/** From here on balloons and dimensions are left out while the hand moves, so that it stays smooth. */
+const MANY_PARTS = 24;
+const WHILE_MOVING = { ...SHOW_ALL, balloons: false, dimensions: false };
 const native = (context: Context): CanvasRenderingContext2D => context._context;
 
 const useFigure = (view: View | null): DisplayList | null => {
@@ -47,7 +50,7 @@ const useFigure = (view: View | null): DisplayList | null => {
       properties: figures?.properties ?? null,
       pxPerMm: view.pxPerMm,
       formatLength,
-      show: drawing.parts.length > 40 ? { ...SHOW_ALL, balloons: moving.length === 0 } : SHOW_ALL,
+      show: drawing.parts.length > MANY_PARTS && moving.length > 0 ? WHILE_MOVING : SHOW_ALL,
     });
   }, [drawing, picked, hovered, moving, figures, view, formatLength]);
 };
