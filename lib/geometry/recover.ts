@@ -87,7 +87,8 @@ const cornerOf = (before: Edge | undefined, after: Edge | undefined, clipped: Po
   const sine = Math.abs(d.x * e.y - d.y * e.x);
   const reach = reachOf(before) + reachOf(after) + (4 * step) / Math.max(sine, 1e-6);
   const onBoth = (p: Point) => distanceToEdge(before, p) <= TOUCH_MM && distanceToEdge(after, p) <= TOUCH_MM;
-  const crossings = curvesMeet(before, after, 0).filter((p) => away(p) <= reach && onBoth(p));
+  // A circle that stops short of its tangent by rounding still has its corner at the point of contact.
+  const crossings = curvesMeet(before, after, TOUCH_MM).filter((p) => away(p) <= reach && onBoth(p));
   return (
     crossings.reduce<Point | null>((best, p) => (best === null || away(p) < away(best) ? p : best), null) ??
     clipped

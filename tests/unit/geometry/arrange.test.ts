@@ -170,6 +170,17 @@ test("refuses more overlaps than it can settle in time, with their number", () =
 });
 
 describe("cut-outs", () => {
+  test.each([0, 8e-14])("a bore that stops %d mm short of a tangent edge takes exact segments", (short) => {
+    const [half, outer, inner] = [5, 50 - short, 47.5];
+    /** Of a circle, what lies within `half` of its upright diameter. */
+    const strip = (r: number) => 2 * (half * Math.sqrt(r * r - half * half) + r * r * Math.asin(half / r));
+    const { parts } = arranged(
+      [partOf("plate", [rectangle(10, 100)])],
+      [cutoutOf("ring", [put(disc(outer, inner), 0, 0, 45)])],
+    );
+    expectRel(areaOf(parts.flat()), 1000 - strip(outer) + strip(inner), { rel: 1e-9 });
+  });
+
   const plate = partOf("plate", [rectangle(200, 100)]);
 
   test("a hole inside a part is its exact circle", () => {
