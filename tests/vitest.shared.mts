@@ -15,6 +15,7 @@ const common = {
   pool: "forks",
   passWithNoTests: false,
   env: { LOG_LEVEL: "silent" },
+  setupFiles: [`${root}tests/helpers/random-seed.ts`],
 } as const;
 
 /** Suites that share nothing: as many at once as there are cores. */

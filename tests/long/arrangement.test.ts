@@ -10,6 +10,7 @@ test.each(["tee", "lap", "corner"] as const)(
   (kind) => {
     fc.assert(fc.property(touchingPlates(kind), holdsTogether), { numRuns: 2_000, endOnFailure: true });
   },
+  MINUTES,
 );
 
 test(
