@@ -4,7 +4,7 @@ import { redirect } from "next/navigation";
 import { cache } from "react";
 import { database } from "@/db/client";
 import { authenticate } from "@/lib/auth/authenticate";
-import type { Ctx } from "@/lib/services/context";
+import type { Ctx, OpenCtx } from "@/lib/services/context";
 import { newId } from "@/lib/services/new-id";
 
 /** Context of the person a page is for; null when nobody is signed in. Read once for each request. */
@@ -21,3 +21,10 @@ export const pageContext = async (path: string): Promise<Ctx> => {
   if (ctx === null) redirect(`/sign-in?next=${encodeURIComponent(path)}`);
   return ctx;
 };
+
+/** Context of a page that anyone may open, such as the one a letter links to. */
+export const openPageContext = async (): Promise<OpenCtx> => ({
+  db: await database(),
+  now: Date.now(),
+  requestId: newId(),
+});
