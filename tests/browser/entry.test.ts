@@ -1,9 +1,12 @@
+import { execFile } from "node:child_process";
+import { promisify } from "node:util";
 import type { Page } from "playwright-core";
 import { expect, test } from "vitest";
 import type { LetterList } from "@/lib/schemas/letter";
 import { clientOf, expectStatus, signedIn } from "@/tests/helpers/api-client";
 import { browserSuite, expectAccessible, expectNoSidewaysScroll, picture } from "@/tests/helpers/browser";
 import { DEMO_PASSWORD } from "@/tests/helpers/demo-accounts";
+import { ROOT } from "@/tests/helpers/source-files";
 
 const { person, server } = browserSuite();
 const PASSWORD = "four green trucks at dawn";
@@ -117,4 +120,33 @@ test.each([
   await page.goto("/password-reset");
   await page.getByRole("button", { name: "Send the letter" }).waitFor();
   await expectSound(page, `ask-${width}`);
+});
+
+test("somebody of another firm is told so, accepts with the password they have, and lands in the new firm", async () => {
+  const email = "m.ferry@otherworks.example";
+  const made = await promisify(execFile)(
+    process.execPath,
+    [
+      ...["--conditions=react-server", "--import", "tsx", "lib/commands/admin.ts", "create"],
+      ...["--organisation", "Other Works", "--email", email, "--name", "M. Ferry"],
+    ],
+    { cwd: ROOT, env: { ...process.env, DATABASE_URL: `file:${server().databaseFile}` } },
+  );
+  const own = /password (\S+) \(shown/.exec(made.stdout)?.[1] ?? "";
+  const { page } = await person();
+  await page.goto(await invite(email));
+  await page.getByText("You have an account with this address already.").waitFor();
+  await page.getByLabel("Password of your account").fill("not my password");
+  await page.keyboard.press("Enter");
+  await page.getByRole("alert").getByText("give the password you have").waitFor();
+  expect(await page.getByLabel("Password of your account").inputValue()).toBe("not my password");
+  await expectSound(page, "invitation-known");
+  await page.getByLabel("Password of your account").fill(own);
+  await page.keyboard.press("Enter");
+  await page.waitForURL("**/rack");
+  const me = await page.request.get("/api/v1/me");
+  expect(await me.json()).toMatchObject({
+    organisation: { name: "Harrow & Tide Fabrication" },
+    role: "engineer",
+  });
 });
