@@ -11,12 +11,12 @@ export const resolve = {
 };
 
 const common = {
-  environment: "node",
-  pool: "forks",
+  environment: "node" as const,
+  pool: "forks" as const,
   passWithNoTests: false,
   env: { LOG_LEVEL: "silent" },
   setupFiles: [`${root}tests/helpers/random-seed.ts`],
-} as const;
+};
 
 /** Suites that share nothing: as many at once as there are cores. */
 export const apart = (name: string, folders: readonly string[]) => ({
