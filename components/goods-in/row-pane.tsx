@@ -54,7 +54,12 @@ export function RowPane({ delivery, number, decidable, onNext, onRefused }: RowP
       ) : (
         <>
           <RowHead row={row} undecided={delivery.counts?.undecided ?? 0} />
-          <div className="min-h-0 flex-1 overflow-y-auto max-lg:overflow-visible">
+          <div
+            role="region"
+            aria-label="The row in hand"
+            tabIndex={0}
+            className="min-h-0 flex-1 overflow-y-auto max-lg:overflow-visible"
+          >
             {row.drawing !== null && (
               <div className="flex justify-center border-b border-rule">
                 <ShapeFigure
